@@ -1,5 +1,6 @@
 // JSON with places: a value tree in which every value and every name knows where in the text it stands, so that whoever
-// reads a rule or a panel can point at the very characters that are wrong.
+// reads a rule or a panel can point at the very characters that are wrong; and a reader of objects that reports what is
+// missing, of the wrong kind, or unknown.
 #pragma once
 
 #include "isohydric/diag/report.hpp"
@@ -79,5 +80,57 @@ struct Member {
 
 /// The place of the decoded bytes `[begin, end)` of a string, inside its quotes. Offsets behind the string mean its end.
 [[nodiscard]] Place string_place(const Json& string_value, std::size_t begin, std::size_t end);
+
+/// Reads one object. Every name asked for is thereby known; `finish()` reports the members that nobody asked for. The
+/// object and the report must outlive the reader.
+class ObjectReader {
+  public:
+    /// `what` names the object in messages: `interval`. Another kind of value than an object is reported at once; all
+    /// questions then find nothing and report nothing more.
+    ObjectReader(const Json& object, Report& report, std::string what);
+
+    /// The member; reports one that is missing or of another kind, and gives null then.
+    const Json* required(std::string_view name, Kind kind);
+
+    /// The member, or null where it is missing or null; reports one of another kind, and gives null then.
+    const Json* optional(std::string_view name, Kind kind);
+
+    /// The member of whatever kind, or null where it is missing.
+    const Json* any(std::string_view name);
+
+    std::optional<std::string> required_text(std::string_view name);
+    std::optional<std::string> optional_text(std::string_view name);
+    std::optional<double> required_number(std::string_view name);
+    std::optional<double> optional_number(std::string_view name);
+    std::optional<bool> required_bool(std::string_view name);
+    std::optional<bool> optional_bool(std::string_view name);
+
+    /// An array of strings; items of another kind are reported and left out.
+    std::optional<std::vector<std::string>> required_texts(std::string_view name);
+    std::optional<std::vector<std::string>> optional_texts(std::string_view name);
+
+    /// Whether the value is an object at all.
+    [[nodiscard]] bool is_object() const { return object_ != nullptr; }
+
+    /// The place of the object.
+    [[nodiscard]] const Place& place() const { return place_; }
+
+    /// Reports every member that was not asked for, with the nearest known name.
+    void finish();
+
+  private:
+    const Json* ask(std::string_view name);
+    const Json* of_kind(const Json* value, std::string_view name, Kind kind);
+    std::optional<std::vector<std::string>> texts(const Json* array, std::string_view name);
+
+    const Json* object_;  // null if the value is no object
+    Place place_;
+    Report& report_;
+    std::string what_;
+    std::vector<std::string> asked_;
+};
+
+/// Reports `json-wrong-kind` and gives false unless the value has the kind; `what` names it in the message.
+bool expect_kind(const Json& value, Kind kind, std::string_view what, Report& report);
 
 }  // namespace isohydric::diag
