@@ -30,36 +30,74 @@ inline constexpr Wide k_two_thirds = {0x1.555555p-1, 0x1.5555555555555p-27};
 
 /// The polynomial with these coefficients, highest power first.
 template <std::size_t Size>
-[[nodiscard]] inline double polynomial(double x, const std::array<double, Size>& coefficients) {
-    return [&]<std::size_t... Index>(std::index_sequence<Index...>) {
-        double sum = 0.0;
+[[nodiscard, gnu::always_inline]] inline double
+polynomial(double x, const std::array<double, Size>& coefficients) {
+    double sum = 0.0;
+    [&]<std::size_t... Index>(std::index_sequence<Index...>) __attribute__((always_inline)) {
         ((sum = sum * x + coefficients[Index]), ...);
-        return sum;
     }
     (std::make_index_sequence<Size>{});
+    return sum;
+}
+
+// Conditions are masks made from sign bits: the compiler may turn a comparison into a branch, and a
+// loop with a branch does not vectorise.
+using Bits = std::uint64_t;
+
+[[nodiscard, gnu::always_inline]] inline Bits bits_of(double x) {
+    return std::bit_cast<Bits>(x);
+}
+
+inline constexpr Bits k_sign_bit = Bits{1} << 63;
+inline constexpr Bits k_infinity_bits = std::bit_cast<Bits>(k_infinity);
+
+/// All ones if the highest bit is set, else 0.
+[[nodiscard, gnu::always_inline]] inline Bits spread_highest(Bits bits) {
+    return Bits{0} - (bits >> 63);
+}
+
+[[nodiscard, gnu::always_inline]] inline Bits if_negative(double x) {
+    return spread_highest(bits_of(x));
+}
+
+[[nodiscard, gnu::always_inline]] inline Bits if_zero(double x) {
+    return spread_highest((bits_of(x) & ~k_sign_bit) - 1);
+}
+
+[[nodiscard, gnu::always_inline]] inline Bits if_nan(double x) {
+    return spread_highest(k_infinity_bits - (bits_of(x) & ~k_sign_bit));
+}
+
+[[nodiscard, gnu::always_inline]] inline Bits if_infinite_or_nan(double x) {
+    return spread_highest((k_infinity_bits - 1) - (bits_of(x) & ~k_sign_bit));
+}
+
+[[nodiscard, gnu::always_inline]] inline double select(Bits mask, double yes, double no) {
+    return std::bit_cast<double>((bits_of(yes) & mask) | (bits_of(no) & ~mask));
 }
 
 /// `x` brought into [low, high]; NaN stays NaN.
-[[nodiscard]] inline double clamp(double x, double low, double high) {
-    const double raised = x < low ? low : x;
-    return raised > high ? high : raised;
+[[nodiscard, gnu::always_inline]] inline double clamp(double x, double low, double high) {
+    const double raised = select(if_negative(x - low), low, x);
+    const double clamped = select(if_negative(high - raised), high, raised);
+    return select(if_nan(x), x, clamped);
 }
 
 /// The nearest whole number, halves to even; |x| < 2^51.
-[[nodiscard]] inline double nearest_whole(double x) {
+[[nodiscard, gnu::always_inline]] inline double nearest_whole(double x) {
     constexpr double k_drop_fraction = 0x1.8p52;
     return (x + k_drop_fraction) - k_drop_fraction;
 }
 
 /// 2^n for a whole n from -1022 to 1023: the sum leaves n + 1023 in the lowest bits.
-[[nodiscard]] inline double power_of_two(double n) {
+[[nodiscard, gnu::always_inline]] inline double power_of_two(double n) {
     constexpr double k_show_exponent = 0x1.8p52 + 1023.0;
-    return std::bit_cast<double>(std::bit_cast<std::uint64_t>(n + k_show_exponent) << 52);
+    return std::bit_cast<double>(bits_of(n + k_show_exponent) << 52);
 }
 
 /// e^x for |x| <= 746: x = k ln 2 + r with |r| <= 0.35, e^r by its series, whose first three terms
 /// are added without loss, then two scalings of which only the second can round or overflow.
-[[nodiscard]] inline double exp_of(Wide x) {
+[[nodiscard, gnu::always_inline]] inline double exp_of(Wide x) {
     constexpr std::array<double, 12> k_reciprocal_factorials = {1.0 / 87178291200.0,
                                                                 1.0 / 6227020800.0,
                                                                 1.0 / 479001600.0,
@@ -93,11 +131,11 @@ template <std::size_t Size>
 
 /// ln x for 0 < x < infinity, to about 2^-65 of its size: x = 2^k m with m from sqrt(1/2) to sqrt 2,
 /// and ln m = 2 artanh(s), s = (m - 1) / (m + 1), |s| < 0.172. Anything for other x.
-[[nodiscard]] inline Wide log_of(double x) {
-    constexpr std::uint64_t k_mantissa_bits = (std::uint64_t{1} << 52) - 1;
-    constexpr auto k_root_half_bits = std::bit_cast<std::uint64_t>(0x1.6a09e667f3bcdp-1);
-    constexpr auto k_one_bits = std::bit_cast<std::uint64_t>(1.0);
-    constexpr auto k_2_52_bits = std::bit_cast<std::uint64_t>(0x1p52);
+[[nodiscard, gnu::always_inline]] inline Wide log_of(double x) {
+    constexpr Bits k_mantissa_bits = (Bits{1} << 52) - 1;
+    constexpr auto k_root_half_bits = std::bit_cast<Bits>(0x1.6a09e667f3bcdp-1);
+    constexpr auto k_one_bits = std::bit_cast<Bits>(1.0);
+    constexpr auto k_2_52_bits = std::bit_cast<Bits>(0x1p52);
     constexpr std::array<double, 11> k_odd_reciprocals = {2.0 / 25.0,
                                                           2.0 / 23.0,
                                                           2.0 / 21.0,
@@ -109,11 +147,10 @@ template <std::size_t Size>
                                                           2.0 / 9.0,
                                                           2.0 / 7.0,
                                                           2.0 / 5.0};
-    const bool is_subnormal = x < std::numeric_limits<double>::min();
-    const double scale = is_subnormal ? 0x1p54 : 1.0;
-    const double bias = is_subnormal ? 0x1p52 + 1023.0 + 54.0 : 0x1p52 + 1023.0;
-    const std::uint64_t bits =
-        std::bit_cast<std::uint64_t>(x * scale) + (k_one_bits - k_root_half_bits);
+    const Bits if_subnormal = if_negative(x - std::numeric_limits<double>::min());
+    const double scale = select(if_subnormal, 0x1p54, 1.0);
+    const double bias = select(if_subnormal, 0x1p52 + 1023.0 + 54.0, 0x1p52 + 1023.0);
+    const Bits bits = bits_of(x * scale) + (k_one_bits - k_root_half_bits);
     const double k = std::bit_cast<double>((bits >> 52) | k_2_52_bits) - bias;
     const double m = std::bit_cast<double>((bits & k_mantissa_bits) + k_root_half_bits);
 
@@ -132,65 +169,54 @@ template <std::size_t Size>
     return add_smaller({k * k_ln2_hi, k * k_ln2_lo}, log_m);
 }
 
-/// `value` where x is positive and finite; else what every logarithm has at x.
-[[nodiscard]] inline double log_or_edge(double x, double value) {
-    const double below = x == 0.0 ? -k_infinity : k_not_a_number;
-    const double finite = x > 0.0 ? value : below;
-    return x < k_infinity ? finite : x;
+/// What to add to `log_of(x)`, which is finite for every x: 0, or where there is no logarithm what
+/// stands for it.
+[[nodiscard, gnu::always_inline]] inline double log_edge(double x) {
+    const double above = select(if_infinite_or_nan(x), x, 0.0);
+    const double not_zero = select(if_negative(x), k_not_a_number, above);
+    return select(if_zero(x), -k_infinity, not_zero);
 }
-
-/// x^y for x zero or infinite, where `rises` is y for infinite x and -y for zero.
-[[nodiscard]] inline double pow_at_edge(double rises) {
-    const double level = rises == 0.0 ? 1.0 : k_not_a_number;
-    const double falling = rises < 0.0 ? 0.0 : level;
-    return rises > 0.0 ? k_infinity : falling;
-}
-
-inline constexpr double k_exp_is_zero_below = -746.0;
-inline constexpr double k_exp_is_infinite_above = 710.0;
 
 }  // namespace detail
 
 /// e^x; overflows to infinity, underflows through the subnormal numbers to 0.
-[[nodiscard]] inline double exp(double x) {
-    return detail::exp_of(
-        split(detail::clamp(x, detail::k_exp_is_zero_below, detail::k_exp_is_infinite_above)));
+[[nodiscard, gnu::always_inline]] inline double exp(double x) {
+    return detail::exp_of(split(detail::clamp(x, -746.0, 710.0)));
 }
 
 /// 10^x; exact where the power is a double; overflow and underflow as for exp.
-[[nodiscard]] inline double pow10(double x) {
+[[nodiscard, gnu::always_inline]] inline double pow10(double x) {
     return detail::exp_of(split(detail::clamp(x, -323.9, 308.3)) * detail::k_ln10);
 }
 
 /// Natural logarithm; -infinity at 0, NaN below.
-[[nodiscard]] inline double log(double x) {
-    return detail::log_or_edge(x, detail::log_of(x).rounded());
+[[nodiscard, gnu::always_inline]] inline double log(double x) {
+    return detail::log_of(x).rounded() + detail::log_edge(x);
 }
 
 /// Logarithm to base 10, exact at powers of ten; -infinity at 0, NaN below.
-[[nodiscard]] inline double log10(double x) {
-    return detail::log_or_edge(x, (detail::log_of(x) * detail::k_log10_e).rounded());
+[[nodiscard, gnu::always_inline]] inline double log10(double x) {
+    return (detail::log_of(x) * detail::k_log10_e).rounded() + detail::log_edge(x);
 }
 
-/// x^y for x >= 0; x^0 = 1 there; NaN for a negative x (also with a whole y) and for NaN.
-[[nodiscard]] inline double pow(double x, double y) {
+/// x^y for x >= 0; NaN below, also with a whole y. x^0 is 1 for every x, as in IEEE 754.
+[[nodiscard, gnu::always_inline]] inline double pow(double x, double y) {
     constexpr double k_beyond_any_use = 0x1p64;
     const Wide exponent =
         detail::log_of(x) * split(detail::clamp(y, -k_beyond_any_use, k_beyond_any_use));
-    const double limited =
-        detail::clamp(exponent.hi, detail::k_exp_is_zero_below, detail::k_exp_is_infinite_above);
-    const double inside = detail::exp_of({limited, limited == exponent.hi ? exponent.lo : 0.0});
-    const double edge = detail::pow_at_edge(x == 0.0 ? -y : y);
-    const double from_zero = x > 0.0 && x < detail::k_infinity ? inside : edge;
-    return x >= 0.0 ? from_zero : detail::k_not_a_number;
+    const double edge = detail::log_edge(x);
+    const double raised_edge = detail::select(
+        detail::if_zero(y), 0.0, detail::select(detail::if_negative(y), -edge, edge));
+    return detail::exp_of({detail::clamp(exponent.hi + raised_edge, -746.0, 710.0),
+                           detail::clamp(exponent.lo, -0x1p-15, 0x1p-15)});
 }
 
 /// Square root, correctly rounded; NaN below 0.
 [[nodiscard]] double sqrt(double x);
 
 /// Magnitude.
-[[nodiscard]] inline double abs(double x) {
-    return std::bit_cast<double>(std::bit_cast<std::uint64_t>(x) & ~(std::uint64_t{1} << 63));
+[[nodiscard, gnu::always_inline]] inline double abs(double x) {
+    return std::bit_cast<double>(detail::bits_of(x) & ~detail::k_sign_bit);
 }
 
 // The same over arrays, to the same bits, vectorised. Each works on as many elements as the shorter

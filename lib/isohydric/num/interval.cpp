@@ -1,6 +1,7 @@
 #include "isohydric/num/interval.hpp"
 
 #include "isohydric/num/exp_log.hpp"
+#include "isohydric/num/rounding.hpp"
 
 #include <algorithm>
 #include <array>
@@ -166,6 +167,10 @@ Interval pow(const Interval& x, const Interval& y) {
                                    pow(base.upper(), y.lower()),
                                    pow(base.upper(), y.upper())});
     return positive_widened(corners.lower(), corners.upper());
+}
+
+Interval round_to_8_decimals(const Interval& x) {
+    return {round_to_8_decimals(x.lower()), round_to_8_decimals(x.upper())};
 }
 
 Certainty is_less(const Interval& a, const Interval& b) {

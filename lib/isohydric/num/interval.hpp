@@ -54,6 +54,10 @@ class Interval {
 /// Of the members of `x` that are not negative.
 [[nodiscard]] Interval pow(const Interval& x, const Interval& y);
 
+/// Exactly from rounded bound to rounded bound, as the rounding never decreases.
+[[nodiscard]] Interval round_to_8_decimals(const Interval& x);
+
+/// Whether a < b, <=, = for the members; `yes` and `no` hold for every pair.
 [[nodiscard]] Certainty is_less(const Interval& a, const Interval& b);
 [[nodiscard]] Certainty is_at_most(const Interval& a, const Interval& b);
 [[nodiscard]] Certainty is_equal(const Interval& a, const Interval& b);
