@@ -119,7 +119,6 @@ class ObjectReader {
     void finish();
 
   private:
-    const Json* ask(std::string_view name);
     const Json* of_kind(const Json* value, std::string_view name, Kind kind);
     std::optional<std::vector<std::string>> texts(const Json* array, std::string_view name);
 
