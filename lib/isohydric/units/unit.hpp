@@ -16,7 +16,7 @@ struct Dimension {
     int mass{};
     int time{};
     int temperature{};
-    int amount{};  ///< mol, eq and osm alike [@ucum, tables 3 and 6]
+    int amount{};  ///< mol, eq and osm alike: UCUM defines eq and osm as 1 mol [@ucum, section 4.4]
 
     friend bool operator==(const Dimension&, const Dimension&) = default;
 };
@@ -25,8 +25,12 @@ struct Dimension {
 [[nodiscard]] Dimension divide(const Dimension& left, const Dimension& right);
 [[nodiscard]] Dimension power(const Dimension& base, int exponent);
 
-/// The greatest exponent, up or down, of one atom (`m3`) and of power(); `10*` takes up to 30.
+/// The greatest exponent, up or down, of an atom in a code (`m3`) and of power().
 inline constexpr int k_largest_exponent = 9;
+/// The same for `10*`.
+inline constexpr int k_largest_decimal_exponent = 30;
+
+class Unit;
 
 namespace detail {
 
@@ -38,13 +42,15 @@ struct Term {
     friend bool operator==(const Term&, const Term&) = default;
 };
 
-/// How much one of a unit is, in metres, grams, seconds, kelvins and moles: mantissa * 10^decimal_exponent, above zero_K.
+/// One of a unit is mantissa * 10^decimal_exponent metres, grams, seconds, kelvins and moles.
 struct Scale {
     Dimension dimension;
     double mantissa = 1;
     int decimal_exponent{};
-    double zero_K{};  ///< 273.15 for Cel: the zero point of the unit; 0 for all others
+    double zero_K{};  ///< where the unit's zero lies: 273.15 for Cel, 0 for a unit without offset
 };
+
+[[nodiscard]] diag::Result<Unit> make_unit(std::string code, std::vector<Term> terms);
 
 }  // namespace detail
 
@@ -62,18 +68,13 @@ class Unit {
     /// Whether the unit's zero is not the quantity's (`Cel`, `[degF]`).
     [[nodiscard]] bool has_offset() const { return scale_.zero_K != 0; }
 
-    /// The same measure under whatever code: `mmol/L`, `mmol/l` and `meq/L` are equal, and a value needs no conversion.
-    friend bool operator==(const Unit& left, const Unit& right);
+    [[nodiscard]] const std::vector<detail::Term>& terms() const { return terms_; }
 
-    friend diag::Result<Unit> parse_unit(std::string_view ucum_code);
-    friend double convert(double value, const Unit& from, const Unit& to);
-    friend double factor_between(const Unit& from, const Unit& to);
-    friend Unit operator*(const Unit& left, const Unit& right);
-    friend Unit operator/(const Unit& left, const Unit& right);
-    friend Unit power(const Unit& base, int exponent);
-    friend Unit one();
+    [[nodiscard]] const detail::Scale& scale() const { return scale_; }
 
   private:
+    friend diag::Result<Unit> detail::make_unit(std::string code, std::vector<detail::Term> terms);
+
     Unit(std::string code, std::vector<detail::Term> terms, const detail::Scale& scale);
 
     std::string code_;
@@ -81,14 +82,14 @@ class Unit {
     detail::Scale scale_;
 };
 
-/// Reads a UCUM case-sensitive code [@ucum, sections 1 to 3] of this subset:
+/// Reads a UCUM case-sensitive code [@ucum, sections 2 to 4] of this subset:
 /// - atoms `m g s min h d wk mo a L l mol eq osm Pa bar m[Hg] m[H2O] [psi] K Cel [degF] % g% 1 [pH] [ppth] 10*`;
 /// - UCUM's metric prefixes from `y` to `Y` on those that take them;
-/// - integer exponents, `.` and `/` from left to right (`a/b.c` is `(a/b).c`), a leading `/`;
-/// - annotations in braces, which count as nothing; no parentheses.
-/// `[pH]` is dimensionless, in UCUM it is a logarithm of mol/L; `Cel` and `[degF]` stand alone, in products write `K`.
+/// - exponents, `.` and `/` from left to right (`a/b.c` is `(a/b).c`), a leading `/`;
+/// - annotations in braces behind an atom or alone, which count as nothing; no parentheses.
+/// `[pH]` is a bare number, where UCUM has a logarithm of mol/L. `Cel`, `[degF]` and `[pH]` stand alone, as in UCUM.
 /// `mm[Hg]` is 133.322387415 Pa, where UCUM rounds to 133.322 Pa (a difference of 2.9e-6).
-/// The error names the atom that is not known, and a known one that is near.
+/// The error names the part that is not known, and what is near to the code.
 [[nodiscard]] diag::Result<Unit> parse_unit(std::string_view ucum_code);
 
 /// The unit of a bare number, `1`.
@@ -97,16 +98,18 @@ class Unit {
 /// Whether values of one can be given in the other.
 [[nodiscard]] bool commensurable(const Unit& left, const Unit& right);
 
-/// The value in another unit. Requires commensurable units. Between equal units the value comes back bit for bit.
+/// The same measure under whatever code: `mmol/L`, `mmol/l` and `meq/L` are equal; a value needs no conversion.
+[[nodiscard]] bool operator==(const Unit& left, const Unit& right);
+
+/// The value in another unit. Requires commensurable units. Between equal units it comes back bit for bit.
 [[nodiscard]] double convert(double value, const Unit& from, const Unit& to);
 
-/// How many of `to` one of `from` is, zero points left aside. Requires commensurable units. Exact for powers of ten of
-/// 1 and above; otherwise the nearest double of the exact ratio, unless the codes raise a pressure of a liquid column to
-/// powers.
+/// How many of `to` one of `from` is, zero points left aside. Requires commensurable units. Exact where the ratio is a
+/// power of ten up to 10^22, the nearest double down to 10^-22, otherwise within three units in the last place.
 [[nodiscard]] double factor_between(const Unit& from, const Unit& to);
 
-/// Products for checking expressions; equal atoms merge, annotations are dropped. `Cel` and `[degF]` count as degrees
-/// there, without their zero points, except times or over `1`, which leaves a unit as it is.
+/// Products, for checking expressions: equal atoms merge, annotations and `[pH]` are dropped, `1` changes nothing. `Cel`
+/// and `[degF]` count as degrees in a product, without their zero points.
 [[nodiscard]] Unit operator*(const Unit& left, const Unit& right);
 [[nodiscard]] Unit operator/(const Unit& left, const Unit& right);
 /// Requires an exponent within +/- k_largest_exponent.
