@@ -1,14 +1,13 @@
 // The instruction set of a compiled rule set: each operation writes one column from others.
 #pragma once
 
-#include <array>
+#include "isohydric/engine/truth.hpp"
+
+#include <compare>
 #include <cstdint>
 #include <vector>
 
 namespace isohydric::engine {
-
-/// Three-valued logic, as FHIRPath has it: empty is `unknown`.
-enum class Truth : std::uint8_t { no, yes, unknown };
 
 /// What a column holds.
 enum class SlotKind : std::uint8_t { number, truth, index };
@@ -17,19 +16,22 @@ enum class SlotKind : std::uint8_t { number, truth, index };
 struct Slot {
     SlotKind kind{};
     std::uint32_t index{};
-    friend bool operator==(const Slot&, const Slot&) = default;
+    friend auto operator<=>(const Slot&, const Slot&) = default;
 };
 
+/// What an operation does. Numbers are missing where an operand is, where a function is outside its domain, after a
+/// division by zero and where a result is not finite; truths follow the three-valued logic of FHIRPath.
 enum class OpCode : std::uint8_t {
-    constant_number,
-    constant_truth,
-    load_analyte,
-    load_rounding,
-    load_context_number,
+    constant_number,  // number
+    constant_missing,
+    constant_truth,  // argument: Truth
+    load_analyte,    // argument: panel::Analyte
+    load_rounding,   // argument: panel::Analyte
+    load_context,    // argument: panel::ContextItem, a number
     load_near,
-    code_equals,
-    select_interval,
-    load_limit,
+    code_equals,      // argument: panel::ContextItem, part: its code
+    select_interval,  // argument: interval name; an index column
+    load_limit,       // part: rule::LimitPart, operand: an index column
     add,
     subtract,
     multiply,
@@ -56,22 +58,20 @@ enum class OpCode : std::uint8_t {
     logical_not,
     number_exists,
     truth_exists,
-    choose_number,
-    choose_truth,  // condition, if yes, if no
-    first_number,  // first operand that is present
-    state,         // when, then the findings that take precedence
-    model,
+    choose_number,  // condition, if yes, if no; missing where the condition is unknown
+    first_number,   // first operand that is present
+    model,          // argument: index of the model
 };
 
-/// One instruction. Operands are slots; `argument` is an immediate index (analyte, context item, model, interval name,
-/// code), `part` which limit, `number` an immediate number.
+/// One instruction. Operands are slots; `argument` and `part` are immediate indices, `number` an immediate number.
 struct Operation {
     OpCode code{};
-    Slot result;
-    std::vector<Slot> operands;
+    Slot result{};
+    std::vector<Slot> operands{};
     std::uint32_t argument{};
     std::uint32_t part{};
     double number{};
+    friend auto operator<=>(const Operation&, const Operation&) = default;
 };
 
 }  // namespace isohydric::engine

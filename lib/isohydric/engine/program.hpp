@@ -7,9 +7,11 @@
 #include "isohydric/rule/rule_set.hpp"
 
 #include <cstdint>
+#include <map>
 #include <memory>
 #include <optional>
 #include <span>
+#include <tuple>
 #include <unordered_map>
 #include <vector>
 
@@ -24,11 +26,26 @@ struct Selection {
     std::vector<std::uint32_t> checks;
     std::vector<std::uint32_t> criticals;
     std::vector<std::uint32_t> explanations;  ///< with their compensation bands
+    /// Keep the column of every node and of the names in sentences, so that explain, needs and fill work. Without it
+    /// columns are used again once nobody needs them: less memory to stream through, the same results.
+    bool keep_nodes = true;
 };
 
 /// Where the compensation band of an explanation is found.
 struct BandSlots {
     Slot low, high;
+};
+
+/// An order of names for lookup.
+struct SymbolOrder {
+    [[nodiscard]] bool operator()(const rule::Symbol& a, const rule::Symbol& b) const {
+        return std::tie(a.kind, a.index, a.limit_part) < std::tie(b.kind, b.index, b.limit_part);
+    }
+};
+
+/// How many columns of each kind an evaluation needs.
+struct SlotCounts {
+    std::uint32_t numbers = 0, truths = 0, indices = 0;
 };
 
 /// The compiled form of a rule set. Immutable; share it between threads.
@@ -40,7 +57,9 @@ class Program {
 
     [[nodiscard]] std::span<const Operation> operations() const { return operations_; }
 
-    /// Slots of entries, by their index in the rule set; empty if not selected.
+    [[nodiscard]] const SlotCounts& slots() const { return slots_; }
+
+    /// Slots of entries, by their index in the rule set; empty if neither selected nor (with keep_nodes) needed by what is.
     [[nodiscard]] std::optional<Slot> quantity(std::uint32_t index) const;
     /// Slots of a quantity's alternatives, in order (to say which one counted).
     [[nodiscard]] std::span<const Slot> alternatives(std::uint32_t quantity_index) const;
@@ -52,55 +71,71 @@ class Program {
     [[nodiscard]] std::optional<BandSlots> band(std::uint32_t explanation_index) const;
     /// Which interval of a name holds: an index column into RuleSet::intervals, -1 for none.
     [[nodiscard]] std::optional<Slot> interval(std::uint32_t name_index) const;
-    /// The slot of any node of a selected entry's expression.
+    /// The slot of any node of a selected entry's expression; only with keep_nodes. Codes have none.
     [[nodiscard]] std::optional<Slot> node(const rule::Expression& expression) const;
+    /// The slot of a name that a selected entry uses in an expression or a sentence; only with keep_nodes.
+    [[nodiscard]] std::optional<Slot> name(const rule::Symbol& symbol) const;
 
   private:
     friend class Compiler;
     std::shared_ptr<const rule::RuleSet> rules_;
     std::vector<Operation> operations_;
+    SlotCounts slots_;
     std::vector<std::optional<Slot>> quantities_, conditions_, findings_, checks_, criticals_,
         explanations_, intervals_;
     std::vector<std::vector<Slot>> alternatives_;
     std::vector<std::optional<BandSlots>> bands_;
     std::unordered_map<const rule::Expression*, Slot> nodes_;
+    std::map<rule::Symbol, Slot, SymbolOrder> names_;
 };
 
 /// The columns of one evaluation. One per thread; reused from block to block.
 class Scratch {
   public:
+    /// Columns for blocks of up to `capacity` rows.
     Scratch(const Program& program, std::size_t capacity);
 
+    [[nodiscard]] std::size_t capacity() const { return capacity_; }
+
+    /// Rows of the block evaluated last.
     [[nodiscard]] std::size_t size() const { return size_; }
 
+    /// The number, 0 where it is missing.
     [[nodiscard]] double number(Slot slot, std::size_t row) const {
-        return numbers_[slot.index].values[row];
+        return values_[slot.index * stride_ + row];
     }
 
     [[nodiscard]] bool missing(Slot slot, std::size_t row) const {
-        return numbers_[slot.index].missing[row] != 0;
+        return missing_[slot.index * stride_ + row] != 0;
     }
 
     [[nodiscard]] std::optional<double> value(Slot slot, std::size_t row) const {
         return missing(slot, row) ? std::nullopt : std::optional<double>(number(slot, row));
     }
 
-    [[nodiscard]] Truth truth(Slot slot, std::size_t row) const { return truths_[slot.index][row]; }
+    [[nodiscard]] Truth truth(Slot slot, std::size_t row) const {
+        return truths_[slot.index * stride_ + row];
+    }
 
     [[nodiscard]] std::int32_t index(Slot slot, std::size_t row) const {
-        return indices_[slot.index][row];
+        return indices_[slot.index * stride_ + row];
     }
 
   private:
-    friend void evaluate(const Program&, const panel::PanelBlock&, Scratch&);
-    friend struct Columns;
+    friend class Columns;
+    Scratch(const SlotCounts& slots, std::size_t capacity);
+
+    std::size_t capacity_;
+    std::size_t stride_;
     std::size_t size_ = 0;
-    std::vector<panel::NumberColumn> numbers_;
-    std::vector<std::vector<Truth>> truths_;
-    std::vector<std::vector<std::int32_t>> indices_;
+    std::vector<double> values_;
+    std::vector<std::uint8_t> missing_;
+    std::vector<Truth> truths_;
+    std::vector<std::int32_t> indices_;
 };
 
 /// Evaluates every operation over the rows of `block`. Never fails: what cannot be computed is missing or unknown.
+/// `scratch` must have been made for `program`, and be large enough for the block.
 void evaluate(const Program& program, const panel::PanelBlock& block, Scratch& scratch);
 
 }  // namespace isohydric::engine
