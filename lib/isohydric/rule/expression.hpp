@@ -80,6 +80,7 @@ struct Expression {
     units::Unit written_unit = units::one();  ///< the unit a quantity literal was written in
     std::uint32_t code{};                     ///< code literal: its number within its enumeration
     Symbol symbol;
+    bool never_empty{};  ///< of a name: it always has a value (context codes, `context.near`)
     std::vector<std::shared_ptr<const Expression>> children;
 };
 

@@ -9,6 +9,7 @@
 #include <cstdint>
 #include <functional>
 #include <memory>
+#include <optional>
 #include <string>
 #include <string_view>
 #include <vector>
@@ -33,9 +34,9 @@ struct Token {
     std::string text;
 };
 
-/// All tokens of `text`, the last of kind `end`. What is no token is reported and left out, or read as what was meant
-/// (`==` as `=`), so that the parser can go on.
-[[nodiscard]] std::vector<Token>
+/// All tokens of `text`, the last of kind `end`. Signs that are only spelt otherwise (`==`, `&&`) are reported and read as
+/// what was meant, so that the parser can go on; empty if something had no meaning at all.
+[[nodiscard]] std::optional<std::vector<Token>>
 lex(std::string_view text, const Locator& locate, diag::Report& report);
 
 }  // namespace isohydric::rule

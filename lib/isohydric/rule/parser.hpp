@@ -34,6 +34,9 @@ struct Syntax {
 /// Deepest tree that is accepted; deeper ones should be split into named quantities.
 inline constexpr std::size_t k_depth_limit = 128;
 
+/// Longest text that is read, in bytes.
+inline constexpr std::size_t k_length_limit = 4000;
+
 /// Parses `text`. Errors go to the report, and the result is then empty.
 [[nodiscard]] std::optional<Syntax>
 parse_expression(std::string_view text, const Locator& locate, diag::Report& report);
