@@ -11,7 +11,7 @@
 
 namespace isohydric::panel {
 
-/// A column of numbers with its missing mask (1: missing). Values under the mask are 0.
+/// A column of numbers with its missing mask (1: missing), as long as the block has rows. Values under the mask are 0.
 struct NumberColumn {
     std::vector<double> values;
     std::vector<std::uint8_t> missing;

@@ -1,6 +1,8 @@
 // What is known about a specimen besides its values. Items not given are empty or assumed, and an assumption is remembered.
 #pragma once
 
+#include "isohydric/diag/result.hpp"
+
 #include <array>
 #include <cstdint>
 #include <optional>
@@ -60,6 +62,7 @@ inline constexpr std::array<std::string_view, 8> k_context_item_names{
 inline constexpr std::array<std::string_view, 8> k_context_item_units{
     "", "", "", "a", "m", "mm[Hg]", "mmol/L", ""};
 
+/// The context of one panel.
 struct Context {
     Specimen specimen = Specimen::not_stated;
     Population population = Population::adult;
@@ -70,5 +73,22 @@ struct Context {
     std::optional<double> baseline_hco3_mmol_L;
     std::vector<std::string> assumed;  ///< in words: "specimen: arterial"
 };
+
+/// A specimen by its name; letter case and separators do not matter. The error says what is known.
+[[nodiscard]] diag::Result<Specimen> read_specimen(std::string_view text);
+[[nodiscard]] diag::Result<Population> read_population(std::string_view text);
+[[nodiscard]] diag::Result<StatedOnset> read_onset(std::string_view text);
+
+/// An age with its unit (`15min`, `6h`, `3d`, `5wk`, `2mo`, `4y` or `4a`) in years of 365.25 days [@ucum, table 3].
+[[nodiscard]] diag::Result<double> read_age_a(std::string_view text);
+
+/// An altitude in metres, bare or as `3510m`, `3.5km`; between the Dead Sea and the highest summit.
+[[nodiscard]] diag::Result<double> read_altitude_m(std::string_view text);
+
+/// Neonate below 28 days, child below 18 years, else adult: common practice.
+[[nodiscard]] Population population_of_age(double age_a);
+
+/// Whether somebody of that age can be of that population. Pregnancy starts at 10 years: common practice.
+[[nodiscard]] bool fits_age(Population population, double age_a);
 
 }  // namespace isohydric::panel
