@@ -42,8 +42,8 @@ std::string quoted(std::string_view text) {
 }
 
 /// Takes the first of the words that `text` begins with off its front.
-template <std::size_t size>
-std::string_view take_any(std::string_view& text, const std::array<std::string_view, size>& words) {
+template <std::size_t Size>
+std::string_view take_any(std::string_view& text, const std::array<std::string_view, Size>& words) {
     for (const std::string_view word : words) {
         if (text.starts_with(word)) {
             text.remove_prefix(word.size());
@@ -51,6 +51,13 @@ std::string_view take_any(std::string_view& text, const std::array<std::string_v
         }
     }
     return {};
+}
+
+/// Takes a sign off the front; whether it was a minus.
+bool take_sign(std::string_view& text) {
+    constexpr std::array<std::string_view, 3> k_signs{"-", "+", k_minus_sign};
+    const std::string_view sign = take_any(text, k_signs);
+    return !sign.empty() && sign != "+";
 }
 
 /// Without white space at both sides, no-break spaces included.
@@ -82,9 +89,7 @@ int take_exponent(std::string_view& text) {
         return 0;
     }
     std::string_view rest = text.substr(1);
-    const bool negative =
-        take_any(rest, std::array<std::string_view, 3>{"-", "+", k_minus_sign}).size() != 0 &&
-        text[1] != '+';
+    const bool negative = take_sign(rest);
     const std::string_view digits = take_while(rest, k_digits);
     if (digits.empty()) {
         return 0;
@@ -137,11 +142,9 @@ std::optional<std::string> fault_in(std::string_view token, DecimalMark decimal_
 
 /// The number at the front of `text`; the error does not repeat the text.
 diag::Result<Parts> scan(std::string_view text, DecimalMark decimal_mark) {
-    constexpr std::array k_signs{std::string_view("-"), std::string_view("+"), k_minus_sign};
     Parts parts;
     std::string_view rest = text;
-    const std::string_view sign = take_any(rest, k_signs);
-    parts.negative = !sign.empty() && sign != "+";
+    parts.negative = take_sign(rest);
     const std::string_view token = take_while(rest, k_digits_and_marks);
     if (auto fault = fault_in(token, decimal_mark)) {
         return diag::unexpected(*std::move(fault));

@@ -81,7 +81,7 @@ constexpr std::array<std::string_view, 2> k_micro{"\u00b5", "\u03bc"};
 std::string with_ascii_micro(std::string_view text) {
     std::string result;
     while (!text.empty()) {
-        const auto micro = std::ranges::find_if(
+        const auto* const micro = std::ranges::find_if(
             k_micro, [&](std::string_view sign) { return text.starts_with(sign); });
         const std::size_t length = micro == k_micro.end() ? 1 : micro->size();
         result += micro == k_micro.end() ? text.substr(0, length) : "u";
@@ -90,8 +90,8 @@ std::string with_ascii_micro(std::string_view text) {
     return result;
 }
 
-template <std::size_t size>
-std::optional<std::string_view> look_up(const std::array<Spelling, size>& table,
+template <std::size_t Size>
+std::optional<std::string_view> look_up(const std::array<Spelling, Size>& table,
                                         std::string_view written) {
     const auto found = std::ranges::find(table, written, &Spelling::written);
     return found == table.end() ? std::nullopt : std::optional(found->ucum);

@@ -42,7 +42,7 @@ std::optional<detail::Scale> scale_of(const std::vector<detail::Term>& terms) {
         (term.exponent > 0 ? scale.mantissa : divisor) *=
             power_of(atom->scale.mantissa, std::abs(term.exponent));
         if (terms.size() == 1 && term.exponent == 1) {
-            scale.zero_K = atom->scale.zero_K;
+            scale.zero_in_kelvins = atom->scale.zero_in_kelvins;
         }
     }
     const bool in_range = scale.mantissa < k_largest_mantissa && divisor < k_largest_mantissa &&
@@ -150,18 +150,19 @@ bool commensurable(const Unit& left, const Unit& right) {
 }
 
 bool operator==(const Unit& left, const Unit& right) {
-    return commensurable(left, right) && left.scale().zero_K == right.scale().zero_K &&
+    return commensurable(left, right) &&
+           left.scale().zero_in_kelvins == right.scale().zero_in_kelvins &&
            factor_between(left, right) == 1;
 }
 
 double convert(double value, const Unit& from, const Unit& to) {
     const auto [above, below] = ratio(from, to);
-    const double from_zero_K = from.scale().zero_K;
-    const double to_zero_K = to.scale().zero_K;
-    if (from_zero_K == to_zero_K) {
+    const double from_zero_in_kelvins = from.scale().zero_in_kelvins;
+    const double to_zero_in_kelvins = to.scale().zero_in_kelvins;
+    if (from_zero_in_kelvins == to_zero_in_kelvins) {
         return value * above / below;
     }
-    return (value * from.factor() + (from_zero_K - to_zero_K)) / to.factor();
+    return (value * from.factor() + (from_zero_in_kelvins - to_zero_in_kelvins)) / to.factor();
 }
 
 double factor_between(const Unit& from, const Unit& to) {

@@ -47,7 +47,8 @@ struct Scale {
     Dimension dimension;
     double mantissa = 1;
     int decimal_exponent{};
-    double zero_K{};  ///< where the unit's zero lies: 273.15 for Cel, 0 for a unit without offset
+    double
+        zero_in_kelvins{};  ///< where the unit's zero lies: 273.15 for Cel, 0 for a unit without offset
 };
 
 [[nodiscard]] diag::Result<Unit> make_unit(std::string code, std::vector<Term> terms);
@@ -66,7 +67,7 @@ class Unit {
     [[nodiscard]] double factor() const;
 
     /// Whether the unit's zero is not the quantity's (`Cel`, `[degF]`).
-    [[nodiscard]] bool has_offset() const { return scale_.zero_K != 0; }
+    [[nodiscard]] bool has_offset() const { return scale_.zero_in_kelvins != 0; }
 
     [[nodiscard]] const std::vector<detail::Term>& terms() const { return terms_; }
 

@@ -28,18 +28,18 @@ constexpr Dimension k_pressure{.length = -1, .mass = 1, .time = -2};
 constexpr Dimension k_mass_concentration{.length = -3, .mass = 1};
 
 /// Zero of the Celsius scale. Defined. [@ucum, section 4.3]
-constexpr double k_zero_celsius_K = 273.15;
+constexpr double k_zero_celsius_in_kelvins = 273.15;
 /// A degree Fahrenheit is 5/9 K. Defined. [@ucum, section 4.4]
-constexpr double k_degree_fahrenheit_K = 5.0 / 9;
+constexpr double k_degree_fahrenheit_in_kelvins = 5.0 / 9;
 /// Zero of the Fahrenheit scale, 459.67 degrees above absolute zero. Derived from 32 degF at 0 degC. [@ucum, section 4.4]
-constexpr double k_zero_fahrenheit_K = 459.67 * 5 / 9;
+constexpr double k_zero_fahrenheit_in_kelvins = 459.67 * 5 / 9;
 /// The conventional column of mercury, 13595.1 kg/m3 times 9.80665 m/s2, in uPa per m, so that it is a whole number.
 /// Defined. Printed as 133.3224 Pa for a millimetre [@nist-sp811, appendix B.8 and footnote 12].
-constexpr double k_mercury_uPa_m = 133322387415;
+constexpr double k_mercury_in_micropascals = 133322387415;
 /// 1000 kg/m3 times 9.80665 m/s2: the conventional column of water. Defined. [@ucum, section 4.4]
-constexpr double k_water_Pa_m = 9806.65;
+constexpr double k_water_in_pascals = 9806.65;
 /// A pound-force, 0.45359237 kg times 9.80665 m/s2, on a square inch, 0.0254 m squared. Defined. [@ucum, section 4.4]
-constexpr double k_psi_Pa = 0.45359237 * 9.80665 / (0.0254 * 0.0254);
+constexpr double k_psi_in_pascals = 0.45359237 * 9.80665 / (0.0254 * 0.0254);
 
 /// A pascal is 1000 g/(m.s2).
 constexpr int k_pascal = 3;
@@ -57,8 +57,8 @@ plain(std::string_view name, const Dimension& dimension, double mantissa, int de
 }
 
 constexpr NamedAtom
-alone(std::string_view name, const Dimension& dimension, double mantissa, double zero_K) {
-    return {name, {{dimension, mantissa, 0, zero_K}, AtomKind::alone}};
+alone(std::string_view name, const Dimension& dimension, double mantissa, double zero_in_kelvins) {
+    return {name, {{dimension, mantissa, 0, zero_in_kelvins}, AtomKind::alone}};
 }
 
 /// Values and metric marks. A Julian year of 365.25 d, a month of a twelfth of it. [@ucum, sections 4.2 to 4.4]
@@ -79,12 +79,12 @@ constexpr std::array k_atoms{
     metric("osm", k_amount, 1, 0),
     metric("Pa", k_pressure, 1, k_pascal),
     metric("bar", k_pressure, 1, k_pascal + 5),
-    metric("m[Hg]", k_pressure, k_mercury_uPa_m, k_pascal - 6),
-    metric("m[H2O]", k_pressure, k_water_Pa_m, k_pascal),
-    plain("[psi]", k_pressure, k_psi_Pa, k_pascal),
+    metric("m[Hg]", k_pressure, k_mercury_in_micropascals, k_pascal - 6),
+    metric("m[H2O]", k_pressure, k_water_in_pascals, k_pascal),
+    plain("[psi]", k_pressure, k_psi_in_pascals, k_pascal),
     metric("K", k_temperature, 1, 0),
-    alone("Cel", k_temperature, 1, k_zero_celsius_K),
-    alone("[degF]", k_temperature, k_degree_fahrenheit_K, k_zero_fahrenheit_K),
+    alone("Cel", k_temperature, 1, k_zero_celsius_in_kelvins),
+    alone("[degF]", k_temperature, k_degree_fahrenheit_in_kelvins, k_zero_fahrenheit_in_kelvins),
     plain("%", k_number, 1, -2),
     metric("g%", k_mass_concentration, 1, 1 - k_litre),
     plain("[ppth]", k_number, 1, -3),

@@ -65,22 +65,32 @@ std::optional<int> parse_exponent(std::string_view text, int largest) {
     return exponent;
 }
 
-/// One part between operators, without its annotation.
-diag::Result<Term> parse_term(std::string_view part) {
-    const std::size_t split = exponent_start(part);
-    const std::string_view atom = part.substr(0, split);
-    if (!find_atom(atom)) {
-        return diag::unexpected(fmt::format("\"{}\" is not known", atom.empty() ? part : atom));
+/// The term of one part between operators; an exponent of 0 if the part counts as nothing (`1`, `{ratio}`).
+diag::Result<Term> parse_part(std::string_view annotated) {
+    if (annotated.empty()) {
+        return diag::unexpected("an operator has nothing beside it");
     }
-    if (split == part.size()) {
+    const auto part = without_annotation(annotated);
+    if (!part) {
+        return diag::unexpected("its braces do not match");
+    }
+    if (part->empty() || *part == "1") {
+        return Term{};
+    }
+    const std::size_t split = exponent_start(*part);
+    const std::string_view atom = part->substr(0, split);
+    if (!find_atom(atom)) {
+        return diag::unexpected(fmt::format("\"{}\" is not known", atom.empty() ? *part : atom));
+    }
+    if (split == part->size()) {
         return Term{std::string(atom), 1};
     }
     const int largest = atom == k_power_of_ten ? k_largest_decimal_exponent : k_largest_exponent;
-    const auto exponent = parse_exponent(part.substr(split), largest);
+    const auto exponent = parse_exponent(part->substr(split), largest);
     if (!exponent) {
         return diag::unexpected(fmt::format(
             "the exponent of \"{}\" is not a whole number between -{} and {} other than 0",
-            part,
+            *part,
             largest,
             largest));
     }
@@ -121,26 +131,18 @@ diag::Result<std::vector<Term>> parse_terms(std::string_view code) {
     std::string_view rest = code;
     bool divides = rest.starts_with('/');
     rest.remove_prefix(divides ? 1 : 0);
-    for (;;) {
+    for (bool more = true; more;) {
         const std::size_t length = part_length(rest);
-        const auto part = without_annotation(rest.substr(0, length));
-        if (!part || length == 0) {
-            return diag::unexpected(part ? "an operator has nothing beside it"
-                                         : "its braces do not match");
+        auto term = parse_part(rest.substr(0, length));
+        if (!term) {
+            return diag::unexpected(std::move(term).error());
         }
-        if (!part->empty() && *part != "1") {
-            auto term = parse_term(*part);
-            if (!term) {
-                return diag::unexpected(std::move(term).error());
-            }
-            term->exponent *= divides ? -1 : 1;
-            terms.push_back(*std::move(term));
+        if (term->exponent != 0) {
+            terms.push_back({std::move(term->atom), divides ? -term->exponent : term->exponent});
         }
-        if (length == rest.size()) {
-            break;
-        }
-        divides = rest[length] == '/';
-        rest.remove_prefix(length + 1);
+        more = length < rest.size();
+        divides = more && rest[length] == '/';
+        rest.remove_prefix(more ? length + 1 : length);
     }
     if (auto fault = misplaced(terms)) {
         return diag::unexpected(*std::move(fault));
