@@ -261,9 +261,11 @@ bool Arithmetic::agree(const Expression& left, const Expression& right, const di
                                   in_words(right.unit)));
         return false;
     }
-    const bool literal =
-        left.kind == NodeKind::number_literal || right.kind == NodeKind::number_literal;
-    if ((left.unit.has_offset() || right.unit.has_offset()) && !literal) {
+    const bool with_zeros = left.unit.has_offset() || right.unit.has_offset();
+    const bool convertible =
+        left.unit.has_offset() && right.unit.has_offset() &&
+        (left.kind == NodeKind::number_literal || right.kind == NodeKind::number_literal);
+    if (with_zeros && !convertible) {
         report_.error(
             "expression-temperature",
             place,
