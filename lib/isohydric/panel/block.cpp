@@ -27,8 +27,7 @@ constexpr std::size_t index_of(ContextItem item) {
 
 }  // namespace
 
-PanelBlock::PanelBlock(std::size_t capacity)
-    : capacity_(capacity) {
+PanelBlock::PanelBlock(std::size_t capacity) : capacity_(capacity) {
     for (std::size_t i = 0; i < k_analyte_count; ++i) {
         reserve(values_[i], capacity);
         reserve(rounding_[i], capacity);

@@ -2,10 +2,10 @@
 
 #include "isohydric/diag/text.hpp"
 
-#include <fmt/format.h>
-
 #include <algorithm>
 #include <utility>
+
+#include <fmt/format.h>
 
 namespace isohydric::panel {
 

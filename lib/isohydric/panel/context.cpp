@@ -5,19 +5,18 @@
 #include "isohydric/units/quantity_text.hpp"
 #include "isohydric/units/unit.hpp"
 
-#include <fmt/format.h>
-
 #include <algorithm>
 #include <span>
+
+#include <fmt/format.h>
 
 namespace isohydric::panel {
 
 namespace {
 
 template <class Code>
-diag::Result<Code> read_code(std::string_view text,
-                             std::span<const std::string_view> names,
-                             std::string_view what) {
+diag::Result<Code>
+read_code(std::string_view text, std::span<const std::string_view> names, std::string_view what) {
     const std::string folded = fold_name(text);
     const auto found = std::ranges::find_if(
         names, [&folded](std::string_view name) { return fold_name(name) == folded; });
@@ -25,8 +24,8 @@ diag::Result<Code> read_code(std::string_view text,
         return static_cast<Code>(found - names.begin());
     }
     const std::vector<std::string> known(names.begin(), names.end());
-    return diag::unexpected(fmt::format(
-        "there is no {} \"{}\"; known are {}", what, text, diag::join(known, ", ")));
+    return diag::unexpected(
+        fmt::format("there is no {} \"{}\"; known are {}", what, text, diag::join(known, ", ")));
 }
 
 /// A spelling of a unit and its UCUM code.
@@ -35,12 +34,21 @@ struct Spelling {
     std::string_view ucum;
 };
 
-constexpr std::array k_age_units{
-    Spelling{"min", "min"}, Spelling{"minutes", "min"}, Spelling{"h", "h"},
-    Spelling{"hours", "h"}, Spelling{"d", "d"},         Spelling{"days", "d"},
-    Spelling{"wk", "wk"},   Spelling{"w", "wk"},        Spelling{"weeks", "wk"},
-    Spelling{"mo", "mo"},   Spelling{"months", "mo"},   Spelling{"y", "a"},
-    Spelling{"yr", "a"},    Spelling{"years", "a"},     Spelling{"a", "a"}};
+constexpr std::array k_age_units{Spelling{"min", "min"},
+                                 Spelling{"minutes", "min"},
+                                 Spelling{"h", "h"},
+                                 Spelling{"hours", "h"},
+                                 Spelling{"d", "d"},
+                                 Spelling{"days", "d"},
+                                 Spelling{"wk", "wk"},
+                                 Spelling{"w", "wk"},
+                                 Spelling{"weeks", "wk"},
+                                 Spelling{"mo", "mo"},
+                                 Spelling{"months", "mo"},
+                                 Spelling{"y", "a"},
+                                 Spelling{"yr", "a"},
+                                 Spelling{"years", "a"},
+                                 Spelling{"a", "a"}};
 constexpr std::array k_altitude_units{
     Spelling{"", "m"}, Spelling{"m", "m"}, Spelling{"metres", "m"}, Spelling{"km", "km"}};
 

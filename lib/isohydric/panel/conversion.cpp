@@ -4,12 +4,12 @@
 #include "isohydric/units/molar_mass.hpp"
 #include "isohydric/units/spelling.hpp"
 
-#include <fmt/format.h>
-
 #include <algorithm>
 #include <cmath>
 #include <utility>
 #include <vector>
+
+#include <fmt/format.h>
 
 namespace isohydric::panel {
 
@@ -50,8 +50,7 @@ bool alike(const units::Unit& left, const units::Unit& right) {
 
 Linear linear_between(const units::Unit& from, const units::Unit& to) {
     return {.factor = units::factor_between(from, to),
-            .offset =
-                from.has_offset() || to.has_offset() ? units::convert(0, from, to) : 0.0};
+            .offset = from.has_offset() || to.has_offset() ? units::convert(0, from, to) : 0.0};
 }
 
 std::string known_units(const AnalyteInfo& info) {
@@ -69,11 +68,9 @@ std::string known_units(const AnalyteInfo& info) {
 diag::Unexpected<std::string> unfit(const AnalyteInfo& info, std::string_view unit) {
     const std::string known = known_units(info);
     return diag::unexpected(
-        known.empty() ? fmt::format("{} has no unit, but {} was found", info.id(), unit)
-                      : fmt::format("{} cannot be given in {}; its units are {}",
-                                    info.id(),
-                                    unit,
-                                    known));
+        known.empty()
+            ? fmt::format("{} has no unit, but {} was found", info.id(), unit)
+            : fmt::format("{} cannot be given in {}; its units are {}", info.id(), unit, known));
 }
 
 diag::Result<Linear> linear_from_charges(const AnalyteInfo& info, const units::Unit& from) {
@@ -85,6 +82,15 @@ diag::Result<Linear> linear_from_charges(const AnalyteInfo& info, const units::U
                         info.no_charge.empty() ? "it has no fixed charge" : info.no_charge));
     }
     return Linear{.factor = units::factor_between(from, info.unit) / *info.charge, .offset = 0};
+}
+
+/// What a hydrogen ion concentration given as pH is told; empty if it is none.
+std::string hydrogen_ion_hint(const AnalyteInfo& info, bool looks_like_it) {
+    return counts(info.unit) == Counts::ph && looks_like_it
+               ? fmt::format("{} looks like a hydrogen ion concentration in nmol/L, which is not "
+                             "converted; give the pH",
+                             info.id())
+               : std::string{};
 }
 
 /// Whether amounts may stand where the canonical unit counts something else: mmol/kg for osmolality, a bare 1 for pH.
@@ -149,21 +155,22 @@ diag::Result<units::Unit> parse_written(std::string_view written) {
     const std::optional<std::string> code = units::ucum_of(written);
     if (!code) {
         const std::string near = units::suggest_unit(written);
-        return diag::unexpected(fmt::format("the unit \"{}\" is not known{}",
-                                            written,
-                                            near.empty() ? "" : fmt::format("; did you mean {}?", near)));
+        return diag::unexpected(
+            fmt::format("the unit \"{}\" is not known{}",
+                        written,
+                        near.empty() ? "" : fmt::format("; did you mean {}?", near)));
     }
     return units::parse_unit(*code);
 }
 
-diag::Unexpected<std::string>
-qualifier_needed(const WrittenValue& value, const std::vector<CustomaryUnit>& readings) {
+diag::Unexpected<std::string> qualifier_needed(const WrittenValue& value,
+                                               const std::vector<CustomaryUnit>& readings) {
     std::vector<std::string> shown;
     for (const CustomaryUnit& unit : readings) {
         shown.push_back(describe_reading(value, unit));
     }
     return diag::unexpected(
-        fmt::format("{} may be {}; say which", value.info.id(), diag::join(shown, ", or ")));
+        fmt::format("{} may be {}; say which", value.name, diag::join(shown, ", or ")));
 }
 
 /// The readings of a bare number, one for each different value.
@@ -177,7 +184,8 @@ BareReadings bare_readings(const WrittenValue& value) {
     std::vector<double> seen;
     for (const CustomaryUnit* unit : of_variant(value.info, value.variant)) {
         const double canonical = unit->to_canonical(value.number.value);
-        if (std::ranges::any_of(seen, [&](double other) { return equal_values(canonical, other); })) {
+        if (std::ranges::any_of(seen,
+                                [&](double other) { return equal_values(canonical, other); })) {
             continue;
         }
         seen.push_back(canonical);
@@ -199,7 +207,8 @@ std::string list_readings(const WrittenValue& value,
 }
 
 std::string with_unit(std::string_view digits, std::string_view text) {
-    return text.empty() ? fmt::format("{} as a fraction", digits) : fmt::format("{} {}", digits, text);
+    return text.empty() ? fmt::format("{} as a fraction", digits)
+                        : fmt::format("{} {}", digits, text);
 }
 
 }  // namespace
@@ -236,16 +245,23 @@ diag::Result<CustomaryUnit> unit_as_written(const WrittenValue& value, std::stri
         const units::Unit known_unit = *units::parse_unit(known->ucum);
         const bool said = qualified.qualifier.empty() || known->qualifier == qualified.qualifier;
         if (said && alike(*parsed, known_unit)) {
-            readings.push_back(seen_through(*known, known_unit, *parsed, qualified.unit));
+            const bool exact = *parsed == known_unit;
+            readings.insert(exact ? readings.begin() : readings.end(),
+                            seen_through(*known, known_unit, *parsed, qualified.unit));
         }
     }
-    const bool ambiguous = readings.size() > 1 && qualified.qualifier.empty() &&
-                           !readings.front().qualifier.empty();
+    const bool ambiguous =
+        readings.size() > 1 && qualified.qualifier.empty() && !readings.front().qualifier.empty();
     if (ambiguous) {
         return qualifier_needed(value, readings);
     }
     if (!readings.empty()) {
         return readings.front();
+    }
+    std::string hint =
+        hydrogen_ion_hint(info, units::commensurable(*parsed, *units::parse_unit("nmol/L")));
+    if (!hint.empty()) {
+        return diag::unexpected(std::move(hint));
     }
     const diag::Result<Linear> linear = linear_to_canonical(info, *parsed, std::nullopt);
     if (!linear) {
@@ -262,6 +278,12 @@ diag::Result<CustomaryUnit> unit_as_written(const WrittenValue& value, std::stri
 }
 
 diag::Result<CustomaryUnit> unit_of_bare(const WrittenValue& value) {
+    constexpr Limits k_hydrogen_ion_nmol_L{.low = 20, .high = 160};
+    std::string hint =
+        hydrogen_ion_hint(value.info, k_hydrogen_ion_nmol_L.contain(value.number.value));
+    if (!hint.empty()) {
+        return diag::unexpected(std::move(hint));
+    }
     const BareReadings readings = bare_readings(value);
     const std::size_t different = readings.plausible.size() + readings.implausible.size();
     const auto needs_no_saying = [&value](const CustomaryUnit& unit) {
@@ -274,18 +296,18 @@ diag::Result<CustomaryUnit> unit_of_bare(const WrittenValue& value) {
         return *readings.plausible.front();
     }
     if (readings.plausible.empty()) {
-        return diag::unexpected(fmt::format("{} is implausible as {}; write the unit",
-                                            value.info.id(),
-                                            list_readings(value, readings.implausible, " and as ")));
+        return diag::unexpected(
+            fmt::format("{} is implausible as {}; write the unit",
+                        value.name,
+                        list_readings(value, readings.implausible, " and as ")));
     }
     const bool one = readings.plausible.size() == 1;
-    return diag::unexpected(
-        fmt::format("{} may be {}{}; write the unit",
-                    value.info.id(),
-                    list_readings(value, readings.plausible, ", or "),
-                    one ? fmt::format(" ({} is implausible)",
-                                      list_readings(value, readings.implausible, ", "))
-                        : std::string{}));
+    return diag::unexpected(fmt::format(
+        "{} may be {}{}; write the unit",
+        value.name,
+        list_readings(value, readings.plausible, ", or "),
+        one ? fmt::format(" ({} is implausible)", list_readings(value, readings.implausible, ", "))
+            : std::string{}));
 }
 
 std::optional<CustomaryUnit> unit_needless(const AnalyteInfo& info, std::string_view variant) {
@@ -305,10 +327,10 @@ std::string describe_reading(const WrittenValue& value, const CustomaryUnit& uni
         return written;
     }
     const double canonical = unit.to_canonical(value.number.value);
-    return fmt::format("{} = {}",
-                       written,
-                       with_unit(fmt::format("{:.{}f}", canonical, value.info.decimals),
-                                 value.info.unit_text));
+    return fmt::format(
+        "{} = {}",
+        written,
+        with_unit(fmt::format("{:.{}f}", canonical, value.info.decimals), value.info.unit_text));
 }
 
 }  // namespace isohydric::panel

@@ -28,7 +28,8 @@ struct Linear {
 /// What has to be known of a name and its value to find the unit.
 struct WrittenValue {
     const AnalyteInfo& info;
-    std::string_view variant;     ///< as the alias says, else empty
+    std::string_view name;     ///< as written, for messages
+    std::string_view variant;  ///< as the alias says, else empty
     const units::NumberText& number;
 };
 

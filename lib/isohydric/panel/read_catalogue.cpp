@@ -6,24 +6,24 @@
 #include "isohydric/panel/detail/read_units.hpp"
 #include "isohydric/panel/detail/shapes.hpp"
 
-#include <fmt/format.h>
-
 #include <algorithm>
 #include <map>
 #include <utility>
+
+#include <fmt/format.h>
 
 namespace isohydric::panel {
 
 namespace {
 
+using detail::has_valid_check_digit;
+using detail::is_date;
+using detail::is_expression_name;
 using diag::Json;
 using diag::Kind;
 using diag::ObjectReader;
 using diag::Place;
 using diag::Report;
-using detail::has_valid_check_digit;
-using detail::is_date;
-using detail::is_expression_name;
 
 Place place_of(const Json* value, const ObjectReader& object) {
     return value == nullptr ? object.place() : value->place();
@@ -33,8 +33,7 @@ Place place_of(const Json* value, const ObjectReader& object) {
 class CatalogueReader {
   public:
     CatalogueReader(Catalogue& catalogue, Report& report)
-        : catalogue_(catalogue),
-          report_(report) {}
+        : catalogue_(catalogue), report_(report) {}
 
     void read(const Json& root);
 
@@ -73,9 +72,11 @@ void CatalogueReader::read(const Json& root) {
     }
     for (const std::string_view id : k_analyte_ids) {
         if (!ids_.contains(id)) {
-            report_.error("catalogue-analyte-missing",
-                          entries->place(),
-                          fmt::format("the analyte \"{}\" is missing; every analyte must be listed once", id));
+            report_.error(
+                "catalogue-analyte-missing",
+                entries->place(),
+                fmt::format("the analyte \"{}\" is missing; every analyte must be listed once",
+                            id));
         }
     }
 }
@@ -106,7 +107,9 @@ void CatalogueReader::claim(std::map<std::string, Place, std::less<>>& taken,
                             std::string_view what) {
     const auto [first, is_new] = taken.emplace(name, place);
     if (!is_new) {
-        report_.error("catalogue-twice", place, fmt::format("the {} \"{}\" is there twice", what, name))
+        report_
+            .error(
+                "catalogue-twice", place, fmt::format("the {} \"{}\" is there twice", what, name))
             .notes.push_back({"first here", first->second});
     }
 }
@@ -144,7 +147,9 @@ void CatalogueReader::read_expression_name(ObjectReader& reader, AnalyteInfo& in
 }
 
 void CatalogueReader::read_aliases(ObjectReader& reader, AnalyteInfo& info) {
-    add_name(std::string(info.id()), {.analyte = info.analyte, .specimen = {}, .variant = {}}, reader.place());
+    add_name(std::string(info.id()),
+             {.analyte = info.analyte, .specimen = {}, .variant = {}},
+             reader.place());
     const Json* list = reader.required("aliases", Kind::array);
     if (list == nullptr) {
         return;
@@ -167,7 +172,8 @@ void CatalogueReader::read_alias(const Json& value, AnalyteInfo& info) {
     meaning.variant = reader.optional_text("variant");
     meaning.negated = reader.optional_bool("negated").value_or(false);
     reader.finish();
-    if (meaning.specimen && std::ranges::find(k_specimen_names, *meaning.specimen) == k_specimen_names.end()) {
+    if (meaning.specimen &&
+        std::ranges::find(k_specimen_names, *meaning.specimen) == k_specimen_names.end()) {
         report_.error("catalogue-value",
                       value.place(),
                       fmt::format("there is no specimen \"{}\"", *meaning.specimen));
@@ -178,7 +184,9 @@ void CatalogueReader::read_alias(const Json& value, AnalyteInfo& info) {
     if (!has_canonical) {
         report_.error("catalogue-unit",
                       value.place(),
-                      fmt::format("the variant \"{}\" has no customary unit {}", *meaning.variant, info.unit.code()));
+                      fmt::format("the variant \"{}\" has no customary unit {}",
+                                  *meaning.variant,
+                                  info.unit.code()));
     }
     if (name) {
         info.aliases.push_back(*name);
@@ -192,13 +200,16 @@ void CatalogueReader::add_name(std::string written, Catalogue::Alias meaning, co
         report_.error("catalogue-value", place, "a name must have letters");
         return;
     }
-    const Catalogue::Name* first =
-        catalogue_.add_name({.written = std::move(written), .folded = {}, .meaning = std::move(meaning), .place = place});
+    const Catalogue::Name* first = catalogue_.add_name({.written = std::move(written),
+                                                        .folded = {},
+                                                        .meaning = std::move(meaning),
+                                                        .place = place});
     if (first != nullptr) {
         report_
             .error("catalogue-name-clash",
                    place,
-                   fmt::format("the name \"{}\" cannot be told from \"{}\" of {}; letter case and separators do not count",
+                   fmt::format("the name \"{}\" cannot be told from \"{}\" of {}; letter case and "
+                               "separators do not count",
                                shown,
                                first->written,
                                id_of(first->meaning.analyte)))
@@ -225,9 +236,10 @@ void CatalogueReader::read_limits(ObjectReader& reader, AnalyteInfo& info) {
     info.plausible = read_range(reader, "plausible");
     info.accepted = read_range(reader, "accepted");
     if (!info.accepted.contain(info.plausible.low) || !info.accepted.contain(info.plausible.high)) {
-        report_.error("catalogue-limits",
-                      reader.place(),
-                      fmt::format("{}: what is plausible must lie within what is accepted", info.id()));
+        report_.error(
+            "catalogue-limits",
+            reader.place(),
+            fmt::format("{}: what is plausible must lie within what is accepted", info.id()));
     }
 }
 
@@ -243,7 +255,8 @@ void CatalogueReader::read_loinc(ObjectReader& reader, AnalyteInfo& info) {
         if (!has_valid_check_digit(code.text())) {
             report_.error("catalogue-value",
                           code.place(),
-                          fmt::format("\"{}\" is no LOINC code: digits, a hyphen and the right check digit are expected",
+                          fmt::format("\"{}\" is no LOINC code: digits, a hyphen and the right "
+                                      "check digit are expected",
                                       code.text()));
         }
         claim(loinc_codes_, std::string(code.text()), code.place(), "LOINC code");
@@ -264,7 +277,8 @@ void CatalogueReader::read_sources(ObjectReader& reader, AnalyteInfo& info) {
     }
     const Json* reviewed = reader.required("reviewed", Kind::string);
     if (reviewed != nullptr && !is_date(reviewed->text())) {
-        report_.error("catalogue-value", reviewed->place(), "reviewed must be a date such as 2026-12-01");
+        report_.error(
+            "catalogue-value", reviewed->place(), "reviewed must be a date such as 2026-12-01");
     }
 }
 

@@ -3,9 +3,9 @@
 #include "isohydric/diag/json.hpp"
 #include "isohydric/panel/conversion.hpp"
 
-#include <fmt/format.h>
-
 #include <algorithm>
+
+#include <fmt/format.h>
 
 namespace isohydric::panel {
 
@@ -17,9 +17,7 @@ void read_unit(const diag::Member& member,
                diag::Report& report) {
     const std::optional<Catalogue::Alias> alias = catalogue.find(member.name);
     if (!alias) {
-        report.error("site-units-name",
-                     member.name_place,
-                     unknown_name(catalogue, member.name));
+        report.error("site-units-name", member.name_place, unknown_name(catalogue, member.name));
         return;
     }
     if (!diag::expect_kind(member.value, diag::Kind::string, "unit", report)) {
@@ -27,6 +25,7 @@ void read_unit(const diag::Member& member,
     }
     const units::NumberText one{.value = 1, .decimals = 0, .digits = "1"};
     const WrittenValue value{.info = catalogue[alias->analyte],
+                             .name = member.name,
                              .variant = alias->variant.value_or(""),
                              .number = one};
     diag::Result<CustomaryUnit> unit = unit_as_written(value, member.value.text());

@@ -22,8 +22,7 @@ class SiteUnits {
     [[nodiscard]] static std::optional<SiteUnits> preset(std::string_view name,
                                                          const Catalogue& catalogue);
 
-    explicit SiteUnits(std::string name)
-        : name_(std::move(name)) {}
+    explicit SiteUnits(std::string name) : name_(std::move(name)) {}
 
     /// The preset or file, as reports show it.
     [[nodiscard]] const std::string& name() const { return name_; }

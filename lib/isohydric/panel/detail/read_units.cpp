@@ -4,10 +4,10 @@
 #include "isohydric/panel/conversion.hpp"
 #include "isohydric/units/molar_mass.hpp"
 
-#include <fmt/format.h>
-
 #include <algorithm>
 #include <utility>
+
+#include <fmt/format.h>
 
 namespace isohydric::panel::detail {
 
@@ -72,10 +72,10 @@ void read_unit_from(ObjectReader& entry, AnalyteInfo& info, Report& report) {
     }
     info.unit_from = analyte_of(other->text());
     if (!info.unit_from || *info.unit_from == info.analyte) {
-        report.error("catalogue-value",
-                     other->place(),
-                     fmt::format("unitFrom must be the id of another analyte, not \"{}\"",
-                                 other->text()));
+        report.error(
+            "catalogue-value",
+            other->place(),
+            fmt::format("unitFrom must be the id of another analyte, not \"{}\"", other->text()));
     }
 }
 
@@ -91,9 +91,8 @@ std::vector<std::string> read_presets(ObjectReader& object, Report& report) {
         if (known) {
             presets.emplace_back(preset.text());
         } else {
-            report.error("catalogue-value",
-                         preset.place(),
-                         R"(a preset is "si" or "conventional")");
+            report.error(
+                "catalogue-value", preset.place(), R"(a preset is "si" or "conventional")");
         }
     }
     return presets;

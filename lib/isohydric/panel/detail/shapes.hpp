@@ -35,8 +35,7 @@ namespace isohydric::panel::detail {
         return (c >= 'a' && c <= 'z') || (c >= 'A' && c <= 'Z');
     };
     return !text.empty() && letter(text.front()) &&
-           std::ranges::all_of(text,
-                               [&](char c) { return letter(c) || (c >= '0' && c <= '9'); });
+           std::ranges::all_of(text, [&](char c) { return letter(c) || (c >= '0' && c <= '9'); });
 }
 
 }  // namespace isohydric::panel::detail
