@@ -219,8 +219,8 @@ inline constexpr Bits k_infinity_bits = std::bit_cast<Bits>(k_infinity);
     return std::bit_cast<double>(detail::bits_of(x) & ~detail::k_sign_bit);
 }
 
-// The same over arrays, to the same bits, vectorised. Each works on as many elements as the shorter
-// span has; input and output may be the same array.
+// The same over arrays, to the same bits (of NaN, to NaN), vectorised. Each works on as many elements
+// as the shortest span has; input and output may be the same array.
 
 /// e^x of each element.
 void exp(std::span<const double> x, std::span<double> out);

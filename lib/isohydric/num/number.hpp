@@ -10,6 +10,7 @@ namespace isohydric::num {
 
 /// Arithmetic with itself and with double, construction from double, and the functions
 /// `exp log log10 pow10 sqrt abs pow`. A comparison is not asked for: a formula has no branch.
+/// Call the functions as `num::exp(x)`: for a double, a bare `exp(x)` would find the C library's.
 template <class T>
 concept Number = std::copyable<T> && std::convertible_to<double, T> &&
     requires(T a, T b, double d) {

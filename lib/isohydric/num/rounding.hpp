@@ -31,9 +31,10 @@ namespace detail {
 
 /// -1, 0 or 1 as `a` is below, equal to or above `b` at 8 decimals; 0 if either is NaN.
 [[nodiscard, gnu::always_inline]] inline int compare_at_8_decimals(double a, double b) {
-    const double rounded_a = round_to_8_decimals(a);
-    const double rounded_b = round_to_8_decimals(b);
-    return int{rounded_a > rounded_b} - int{rounded_a < rounded_b};
+    const double difference = round_to_8_decimals(a) - round_to_8_decimals(b);
+    const double side = detail::select(detail::if_negative(difference), -1.0, 1.0);
+    const detail::Bits if_equal = detail::if_zero(difference) | detail::if_nan(difference);
+    return static_cast<int>(detail::select(if_equal, 0.0, side));
 }
 
 /// `value` with exactly `decimals` digits (0 or more) after the point. Rounds the shortest decimal
