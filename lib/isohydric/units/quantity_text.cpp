@@ -60,20 +60,19 @@ bool take_sign(std::string_view& text) {
     return !sign.empty() && sign != "+";
 }
 
-/// Without white space at both sides, no-break spaces included.
+/// Without white space at both sides, the spaces of typesetters included (no-break, figure, thin, hair).
 std::string_view trim_spaces(std::string_view text) {
-    constexpr std::array<std::string_view, 2> k_no_break_spaces{"\u00a0", "\u202f"};
-    for (;;) {
-        const std::size_t before = text.size();
+    constexpr std::array<std::string_view, 5> k_spaces{
+        "\u00a0", "\u2007", "\u2009", "\u200a", "\u202f"};
+    for (std::size_t before = text.size() + 1; text.size() != before;) {
+        before = text.size();
         text = diag::trim(text);
-        static_cast<void>(take_any(text, k_no_break_spaces));
-        for (const std::string_view space : k_no_break_spaces) {
+        for (const std::string_view space : k_spaces) {
+            text.remove_prefix(text.starts_with(space) ? space.size() : 0);
             text.remove_suffix(text.ends_with(space) ? space.size() : 0);
         }
-        if (text.size() == before) {
-            return text;
-        }
     }
+    return text;
 }
 
 std::string_view take_while(std::string_view& text, std::string_view characters) {

@@ -103,9 +103,9 @@ bool stands_alone(const Term& term) {
 }
 
 /// `Cel` in a product or power would have to lose its zero point.
-std::optional<std::string> misplaced(const std::vector<Term>& terms) {
+std::optional<std::string> misplaced(const std::vector<Term>& terms, bool any_division) {
     const auto found = std::ranges::find_if(terms, stands_alone);
-    if (found == terms.end() || (terms.size() == 1 && found->exponent == 1)) {
+    if (found == terms.end() || (terms.size() == 1 && found->exponent == 1 && !any_division)) {
         return std::nullopt;
     }
     return fmt::format("\"{}\" cannot be part of a product{}",
@@ -130,6 +130,7 @@ diag::Result<std::vector<Term>> parse_terms(std::string_view code) {
     std::vector<Term> terms;
     std::string_view rest = code;
     bool divides = rest.starts_with('/');
+    bool any_division = divides;
     rest.remove_prefix(divides ? 1 : 0);
     for (bool more = true; more;) {
         const std::size_t length = part_length(rest);
@@ -142,9 +143,10 @@ diag::Result<std::vector<Term>> parse_terms(std::string_view code) {
         }
         more = length < rest.size();
         divides = more && rest[length] == '/';
+        any_division = any_division || divides;
         rest.remove_prefix(more ? length + 1 : length);
     }
-    if (auto fault = misplaced(terms)) {
+    if (auto fault = misplaced(terms, any_division)) {
         return diag::unexpected(*std::move(fault));
     }
     return terms;
