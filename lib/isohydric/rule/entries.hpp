@@ -79,8 +79,8 @@ struct Range {
 /// Limits and mid-value of a quantity in one context. At most one interval of a name may hold for any context.
 struct Interval {
     EntryHead head;
-    std::uint32_t name{};  ///< index into RuleSet::interval_names
-    std::optional<double> low, mid, high;
+    std::uint32_t name{};                        ///< index into RuleSet::interval_names
+    std::optional<double> low, mid, high;        ///< in RuleSet::interval_units[name]
     std::vector<panel::Specimen> specimens;      ///< empty: any
     std::vector<panel::Population> populations;  ///< empty: any
     Range age_a, altitude_m;
@@ -101,6 +101,13 @@ struct Finding {
     std::vector<std::uint32_t> asserts;  ///< indices of disorders
     std::vector<std::string> consider;
     std::string table;  ///< id of the table it was compiled from, empty for none
+};
+
+/// A decision table, as far as it is more than the findings and checks that its rows became.
+struct Table {
+    EntryHead head;
+    std::string approach;
+    std::vector<std::string> rows;  ///< ids `<table>.<row>` of findings and checks, in order
 };
 
 /// A plausibility or consistency check: `when` holds if something is wrong.
@@ -147,7 +154,7 @@ struct Explanation {
 /// Findings or explanations declared exclusive and/or exhaustive over a domain.
 struct Group {
     EntryHead head;
-    std::vector<std::string> members;
+    std::vector<std::string> members;  ///< ids of findings, checks or explanations; tables unfolded
     bool exclusive = false;
     bool exhaustive = false;
     ExpressionPtr domain;
