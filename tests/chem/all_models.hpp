@@ -28,6 +28,7 @@ Models<T> closed_form_models() {
                       carbonic_acid_by_ph_models<T>(),
                       carbonic_acid_by_temperature_models<T>(),
                       water_models<T>(),
+                      siggaard_andersen_models<T>(),
                       base_excess_models<T>(),
                       base_excess_of_gas_models<T>(),
                       osmolality_models<T>(),

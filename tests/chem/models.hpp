@@ -29,8 +29,7 @@ struct Model {
 template <num::Number T>
 using Models = std::vector<Model<T>>;
 
-namespace input {
-
+// Inputs that several models share.
 inline constexpr Input k_ph{"ph", usual::k_ph};
 inline constexpr Input k_solubility{"solubility_mmol_L_mmHg", usual::k_solubility_mmol_L_mmHg};
 inline constexpr Input k_pk{"pk", usual::k_pk};
@@ -45,7 +44,5 @@ inline constexpr Input k_ct_hb_g_dL{"ct_hb_g_dL", usual::k_ct_hb_g_dL};
 inline constexpr Input k_ct_hb_mmol_L{"ct_hb_mmol_L", usual::k_ct_hb_mmol_L};
 inline constexpr Input k_so2{"so2", usual::k_so2};
 inline constexpr Input k_base_excess{"base_excess_mmol_L", usual::k_base_excess_mmol_L};
-
-}  // namespace input
 
 }  // namespace isohydric::chem::testing

@@ -28,12 +28,12 @@ T base_excess_of_gas(const BaseExcessForm<T>& form, std::span<const T> x) {
         form, x[2], carbonic_acid::bicarbonate_mmol_L(CarbonicAcid<T>{x[0], x[1]}, x[2], x[3]));
 }
 
+inline constexpr Input k_albumin{"albumin_mmol_L", usual::k_albumin_mmol_L};
+inline constexpr Input k_phosphate{"phosphate_mmol_L", usual::k_phosphate_mmol_L};
+
 template <num::Number T>
-Models<T> base_excess_models() {
-    using namespace input;
+Models<T> siggaard_andersen_models() {
     using X = std::span<const T>;
-    const Input albumin{"albumin_mmol_L", usual::k_albumin_mmol_L};
-    const Input phosphate{"phosphate_mmol_L", usual::k_phosphate_mmol_L};
     return {
         {"siggaard_andersen_1960s::blood",
          {k_ph, k_hco3, k_ct_hb_g_dL},
@@ -55,9 +55,9 @@ Models<T> base_excess_models() {
          {k_ph,
           k_hco3,
           k_ct_hb_mmol_L,
-          albumin,
+          k_albumin,
           {"globulin_g_L", usual::k_globulin_g_L},
-          phosphate},
+          k_phosphate},
          [](X x) {
              const siggaard_andersen_2006::Buffers<T> buffers{x[2], x[3], x[4], x[5]};
              return base_excess_mmol_L(siggaard_andersen_2006::blood(buffers), x[0], x[1]);
@@ -67,6 +67,13 @@ Models<T> base_excess_models() {
          [](X x) {
              return base_excess_mmol_L(siggaard_andersen_ecf::extracellular_fluid<T>(), x[0], x[1]);
          }},
+    };
+}
+
+template <num::Number T>
+Models<T> base_excess_models() {
+    using X = std::span<const T>;
+    return {
         {"clsi::blood",
          {k_ph, k_hco3, k_ct_hb_g_dL},
          [](X x) {
@@ -91,7 +98,7 @@ Models<T> base_excess_models() {
              return base_excess_mmol_L(kellum_2005::plasma(x[2], x[3]), x[0], x[1]);
          }},
         {"wooten_2003::plasma",
-         {k_ph, k_hco3, albumin, phosphate},
+         {k_ph, k_hco3, k_albumin, k_phosphate},
          [](X x) {
              return base_excess_mmol_L(wooten_2003::plasma(x[2], x[3]), x[0], x[1]);
          }},
@@ -100,7 +107,6 @@ Models<T> base_excess_models() {
 
 template <num::Number T>
 Models<T> base_excess_of_gas_models() {
-    using namespace input;
     using X = std::span<const T>;
     return {
         {"siggaard_andersen_1960s::blood_of_gas",
@@ -151,7 +157,6 @@ Models<T> base_excess_of_gas_models() {
 /// By definition, from the form of Siggaard-Andersen 1977.
 template <num::Number T>
 Models<T> standard_bicarbonate_models() {
-    using namespace input;
     using X = std::span<const T>;
     return {
         {"standard_bicarbonate::by_definition",

@@ -19,7 +19,6 @@ inline constexpr Input k_kelman_temperature{"temperature_degC", austin_1963::k_t
 
 template <num::Number T>
 Models<T> carbonic_acid_models() {
-    using namespace input;
     using X = std::span<const T>;
     using Pair = CarbonicAcid<T>;
     return {
@@ -74,7 +73,6 @@ Models<T> carbonic_acid_models() {
 
 template <num::Number T>
 Models<T> carbonic_acid_by_ph_models() {
-    using namespace input;
     using X = std::span<const T>;
     return {
         {"severinghaus_1976::bicarbonate",
@@ -117,7 +115,6 @@ Models<T> carbonic_acid_by_ph_models() {
 
 template <num::Number T>
 Models<T> carbonic_acid_by_temperature_models() {
-    using namespace input;
     using X = std::span<const T>;
     return {
         {"siggaard_andersen_1988::co2_solubility",

@@ -9,7 +9,6 @@ namespace isohydric::chem::testing {
 
 template <num::Number T>
 Models<T> osmolality_models() {
-    using namespace osmolality;
     using X = std::span<const T>;
     const Input sodium{"sodium_mmol_L", usual::k_sodium_mmol_L};
     const Input potassium{"potassium_mmol_L", usual::k_potassium_mmol_L};
@@ -23,41 +22,44 @@ Models<T> osmolality_models() {
         {"smithline_gardner_1976::osmolality",
          solutes,
          [](X x) {
-             return smithline_gardner_1976::osmolality_mOsm_kg(Solutes<T>{x[0], x[1], x[2], x[3]});
+             return osmolality::smithline_gardner_1976::osmolality_mOsm_kg(
+                 osmolality::Solutes<T>{x[0], x[1], x[2], x[3]});
          }},
         {"smithline_gardner_1976::conventional",
          conventional,
          [](X x) {
-             return smithline_gardner_1976::osmolality_mOsm_kg(
-                 ConventionalSolutes<T>{x[0], x[1], x[2]});
+             return osmolality::smithline_gardner_1976::osmolality_mOsm_kg(
+                 osmolality::ConventionalSolutes<T>{x[0], x[1], x[2]});
          }},
         {"dorwart_chalmers_1975::osmolality",
          conventional,
          [](X x) {
-             return dorwart_chalmers_1975::osmolality_mOsm_kg(
-                 ConventionalSolutes<T>{x[0], x[1], x[2]});
+             return osmolality::dorwart_chalmers_1975::osmolality_mOsm_kg(
+                 osmolality::ConventionalSolutes<T>{x[0], x[1], x[2]});
          }},
         {"laboratory_handbook::osmolality",
          conventional,
          [](X x) {
-             return laboratory_handbook::osmolality_mOsm_kg(
-                 ConventionalSolutes<T>{x[0], x[1], x[2]});
+             return osmolality::laboratory_handbook::osmolality_mOsm_kg(
+                 osmolality::ConventionalSolutes<T>{x[0], x[1], x[2]});
          }},
         {"khajuria_krahn_2005::osmolality",
          solutes,
          [](X x) {
-             return khajuria_krahn_2005::osmolality_mOsm_kg(Solutes<T>{x[0], x[1], x[2], x[3]});
+             return osmolality::khajuria_krahn_2005::osmolality_mOsm_kg(
+                 osmolality::Solutes<T>{x[0], x[1], x[2], x[3]});
          }},
         {"rasouli_kalantari_2005::osmolality",
          solutes,
          [](X x) {
-             return rasouli_kalantari_2005::osmolality_mOsm_kg(Solutes<T>{x[0], x[1], x[2], x[3]});
+             return osmolality::rasouli_kalantari_2005::osmolality_mOsm_kg(
+                 osmolality::Solutes<T>{x[0], x[1], x[2], x[3]});
          }},
         {"rasouli_kalantari_2005::osmolality_with_potassium",
          solutes,
          [](X x) {
-             return rasouli_kalantari_2005::osmolality_with_potassium_mOsm_kg(
-                 Solutes<T>{x[0], x[1], x[2], x[3]});
+             return osmolality::rasouli_kalantari_2005::osmolality_with_potassium_mOsm_kg(
+                 osmolality::Solutes<T>{x[0], x[1], x[2], x[3]});
          }},
     };
 }
@@ -75,7 +77,7 @@ Models<T> osmolality_by_parts_models() {
           {"urea_mmol_L", usual::k_urea_mmol_L},
           {"chloride_mmol_L", usual::k_chloride_mmol_L},
           {"lactate_mmol_L", usual::k_lactate_mmol_L},
-          input::k_hco3},
+          k_hco3},
          [](X x) {
              return osmolality::zander::osmolality_mOsm_kg(
                  osmolality::Solutes<T>{x[0], x[1], x[2], x[3]},

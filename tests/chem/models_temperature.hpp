@@ -11,58 +11,54 @@ namespace isohydric::chem::testing {
 
 template <num::Number T>
 Models<T> ph_temperature_models() {
-    using namespace input;
-    using namespace temperature;
     using X = std::span<const T>;
     return {
         {"temperature::ph_rosenthal",
          {k_ph, k_temperature},
          [](X x) {
-             return ph_at(k_rosenthal, x[0], x[1]);
+             return temperature::ph_at(temperature::k_rosenthal, x[0], x[1]);
          }},
         {"temperature::ph_clsi",
          {k_ph, k_temperature},
          [](X x) {
-             return ph_at(k_clsi, x[0], x[1]);
+             return temperature::ph_at(temperature::k_clsi, x[0], x[1]);
          }},
         {"temperature::ph_clsi_0146",
          {k_ph, k_temperature},
          [](X x) {
-             return ph_at(k_clsi_0146, x[0], x[1]);
+             return temperature::ph_at(temperature::k_clsi_0146, x[0], x[1]);
          }},
         {"temperature::ph_at_37_clsi",
          {k_ph, k_temperature},
          [](X x) {
-             return ph_at_37(k_clsi, x[0], x[1]);
+             return temperature::ph_at_37(temperature::k_clsi, x[0], x[1]);
          }},
     };
 }
 
 template <num::Number T>
 Models<T> gas_temperature_models() {
-    using namespace input;
-    using namespace temperature;
     using X = std::span<const T>;
     return {
         {"temperature::pco2_nunn",
          {k_pco2, k_temperature},
          [](X x) {
-             return pco2_at_mmHg(k_pco2_nunn, x[0], x[1]);
+             return temperature::pco2_at_mmHg(temperature::k_pco2_nunn, x[0], x[1]);
          }},
         {"temperature::pco2_bradley",
          {k_pco2, k_temperature},
          [](X x) {
-             return pco2_at_mmHg(k_pco2_bradley, x[0], x[1]);
+             return temperature::pco2_at_mmHg(temperature::k_pco2_bradley, x[0], x[1]);
          }},
         {"temperature::pco2_steep",
          {k_pco2, k_temperature},
          [](X x) {
-             return pco2_at_mmHg(k_pco2_steep, x[0], x[1]);
+             return temperature::pco2_at_mmHg(temperature::k_pco2_steep, x[0], x[1]);
          }},
         {"temperature::pco2_at_37_nunn",
          {k_pco2, k_temperature},
          [](X x) {
-             return pco2_at_37_mmHg(k_pco2_nunn, x[0], x[1]);
+             return temperature::pco2_at_37_mmHg(temperature::k_pco2_nunn, x[0], x[1]);
          }},
         {"severinghaus_1979::ln_po2_per_degC",
          {k_po2},
@@ -84,7 +80,6 @@ Models<T> gas_temperature_models() {
 
 template <num::Number T>
 Models<T> po2_at_37_models() {
-    using namespace input;
     using X = std::span<const T>;
     return {
         {"po2_temperature_clsi::po2_at_37",

@@ -116,7 +116,7 @@ TEST_CASE("published tables: every model has one or is named as having none") {
 
 TEST_CASE("published tables: a file without rows, without citation or not there is refused") {
     const auto path = std::filesystem::temp_directory_path() / "isohydric_chem_table.csv";
-    const auto written = [&](std::string_view text) {
+    const auto written = [&](std::string_view text) -> const std::filesystem::path& {
         std::ofstream(path) << text;
         return path;
     };
