@@ -8,12 +8,12 @@
 #include "isohydric/rule/number_form.hpp"
 #include "isohydric/rule/plain_text.hpp"
 
+#include <doctest/doctest.h>
+
 #include <map>
 #include <optional>
 #include <string>
 #include <vector>
-
-#include <doctest/doctest.h>
 
 namespace isohydric::rule::testing {
 
@@ -107,8 +107,7 @@ inline Wanted truth() {
 }
 
 inline Wanted number(std::optional<std::string_view> unit = std::nullopt) {
-    return {Type::number,
-            unit ? std::optional(units::parse_unit(*unit).value()) : std::nullopt};
+    return {Type::number, unit ? std::optional(units::parse_unit(*unit).value()) : std::nullopt};
 }
 
 /// Every diagnostic as `line:column-column id`, columns counted in the file, the end column behind the last byte.

@@ -25,7 +25,8 @@ std::string tree(const std::string& expression) {
 
 }  // namespace
 
-TEST_CASE("parser: products bind tighter than sums, sums than comparisons [@hl7-fhirpath, grammar]") {
+TEST_CASE(
+    "parser: products bind tighter than sums, sums than comparisons [@hl7-fhirpath, grammar]") {
     CHECK(tree("a + b * c") == "(+ a (* b c))");
     CHECK(tree("a * b + c") == "(+ (* a b) c)");
     CHECK(tree("a - b < c * d") == "(< (- a b) (* c d))");
@@ -47,7 +48,8 @@ TEST_CASE("parser: and binds tighter than or and xor, those tighter than implies
     CHECK(tree("a = b and c") == "(and (= a b) c)");
 }
 
-TEST_CASE("parser: operators of one level group to the left, implies too [@hl7-fhirpath, grammar]") {
+TEST_CASE(
+    "parser: operators of one level group to the left, implies too [@hl7-fhirpath, grammar]") {
     CHECK(tree("a - b - c") == "(- (- a b) c)");
     CHECK(tree("a / b * c") == "(* (/ a b) c)");
     CHECK(tree("a - b + c") == "(+ (- a b) c)");
@@ -104,8 +106,7 @@ TEST_CASE("parser: what FHIRPath has and the rule language has not is named") {
     CHECK(tree("a is Quantity") == "1:4-6 expression-not-supported");
     CHECK(tree("a as Quantity") == "1:4-6 expression-not-supported");
     CHECK(tree("%age") == "1:2-3 expression-not-supported");
-    CHECK(tree("a = {}") ==
-          "1:6-7 expression-not-supported; 1:7-8 expression-not-supported");
+    CHECK(tree("a = {}") == "1:6-7 expression-not-supported; 1:7-8 expression-not-supported");
     CHECK(tree("a[0]") == "1:3-4 expression-not-supported; 1:5-6 expression-not-supported");
     CHECK(tree("$this") == "1:2-3 expression-not-supported");
     CHECK(tree("@2020") == "1:2-3 expression-not-supported");
