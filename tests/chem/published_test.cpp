@@ -120,10 +120,13 @@ TEST_CASE("published tables: a file without rows, without citation or not there 
         std::ofstream(path) << text;
         return path;
     };
-    CHECK_THROWS(read_published_table(written("# By hand [@key, place]\nmodel,expected\n")));
+    CHECK_THROWS(
+        read_published_table(written("# By hand [@kell1975, equation 16]\nmodel,expected\n")));
     CHECK_THROWS(read_published_table(written("model,expected\nx,1\n")));
-    CHECK_THROWS(read_published_table(written("# By hand [@key, place]\nmodel,expected\nx\n")));
-    CHECK_NOTHROW(read_published_table(written("# By hand [@key, place]\nmodel,expected\nx,1\n")));
+    CHECK_THROWS(
+        read_published_table(written("# By hand [@kell1975, equation 16]\nmodel,expected\nx\n")));
+    CHECK_NOTHROW(
+        read_published_table(written("# By hand [@kell1975, equation 16]\nmodel,expected\nx,1\n")));
     std::filesystem::remove(path);
     CHECK_THROWS(read_published_table(path));
 }

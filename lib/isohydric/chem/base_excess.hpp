@@ -9,8 +9,8 @@
 namespace isohydric::chem {
 
 /// BE = weight [(HCO3 - reference) + buffer value (pH - 7.40)]. The reference bicarbonate is that
-/// of its own (solubility, pK') at the reference state: use both together. Source: [@lang2002,
-/// abstract].
+/// of its own (solubility, pK') at the reference state: use both together. Source:
+/// [@lang2002, abstract].
 template <num::Number T>
 struct BaseExcessForm {
     T weight;
@@ -20,8 +20,8 @@ struct BaseExcessForm {
 };
 
 /// Base excess, mmol/L: base that would be titrated to reach the reference state. 37 degC. Domain:
-/// usual::k_ph, usual::k_hco3_mmol_L. Source: [@lang2002, abstract] [@siggaard-andersen1995,
-/// abstract].
+/// usual::k_ph, usual::k_hco3_mmol_L. Source: [@lang2002, abstract]
+/// [@siggaard-andersen1995, abstract].
 template <num::Number T>
 [[nodiscard]] T
 base_excess_mmol_L(const BaseExcessForm<T>& form, const T& ph, const T& hco3_mmol_L) {

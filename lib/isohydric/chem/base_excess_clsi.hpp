@@ -23,8 +23,8 @@ inline constexpr double k_plasma_buffer_mmol_L = 7.7;
 /// Source: [@clsi2009, base excess of blood].
 inline constexpr double k_buffer_per_hb = 1.43;
 
-/// Buffer value of extracellular fluid, mmol/L per unit of pH. Measured. Source: [@pmc6090410,
-/// table 1].
+/// Buffer value of extracellular fluid, mmol/L per unit of pH. Measured. Source:
+/// [@pmc6090410, table 1].
 inline constexpr double k_ecf_buffer_mmol_L = 16.2;
 
 /// Form for whole blood. Domain: usual::k_ct_hb_g_dL. Source: [@clsi2009, base excess of blood].

@@ -11,8 +11,8 @@ namespace isohydric::chem::kellum_2005 {
 /// haemoglobin. Source: [@kellum2005, standard base excess].
 inline constexpr double k_weight = 0.9287;
 
-/// Reference bicarbonate, mmol/L. Unchecked: from memory. Source: [@kellum2005, standard base
-/// excess].
+/// Reference bicarbonate, mmol/L. Unchecked: from memory. Source:
+/// [@kellum2005, standard base excess].
 inline constexpr double k_reference_hco3_mmol_L = 24.4;
 
 /// Buffer value, mmol/L per unit of pH. Unchecked: from memory; equals 2.3 x 3.1 + 7.7.
@@ -27,8 +27,8 @@ inline constexpr double k_buffer_per_albumin = 8.3;
 /// Source: [@kellum2005, corrected standard base excess].
 inline constexpr double k_buffer_per_phosphate = 0.29;
 
-/// mmol/L of albumin per g/dL. Unchecked: from memory. Source: [@kellum2005, corrected standard
-/// base excess].
+/// mmol/L of albumin per g/dL. Unchecked: from memory. Source:
+/// [@kellum2005, corrected standard base excess].
 inline constexpr double k_albumin_mmol_L_per_g_dL = 0.15;
 
 /// mmol/L of phosphate per mg/dL. Unchecked: from memory.

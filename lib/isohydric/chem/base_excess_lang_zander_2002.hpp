@@ -27,12 +27,12 @@ inline constexpr double k_reference_hco3_mmol_L = 24.26;
 /// Buffer value of plasma, mmol/L per unit of pH. Measured. Source: [@lang2002, abstract].
 inline constexpr double k_plasma_buffer_mmol_L = 9.5;
 
-/// Buffer value per haemoglobin, mmol/L per unit of pH and g/dL. Measured. Source: [@lang2002,
-/// abstract].
+/// Buffer value per haemoglobin, mmol/L per unit of pH and g/dL. Measured. Source:
+/// [@lang2002, abstract].
 inline constexpr double k_buffer_per_hb = 1.63;
 
-/// Base excess lent by deoxygenation, mmol/L per g/dL of haemoglobin. Measured. Source: [@lang2002,
-/// abstract].
+/// Base excess lent by deoxygenation, mmol/L per g/dL of haemoglobin. Measured. Source:
+/// [@lang2002, abstract].
 inline constexpr double k_oxygen_per_hb = 0.2;
 
 /// Solubility and pK' that belong to the form. Source: [@lang2002, abstract].

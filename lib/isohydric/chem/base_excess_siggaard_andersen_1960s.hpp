@@ -16,8 +16,8 @@ inline constexpr double k_reference_hco3_mmol_L = 24.0;
 /// Buffer value of plasma, mmol/L per unit of pH. Measured. Source: [@lang2002, abstract].
 inline constexpr double k_plasma_buffer_mmol_L = 9.5;
 
-/// Buffer value per haemoglobin, mmol/L per unit of pH and g/dL. Measured. Source: [@lang2002,
-/// abstract].
+/// Buffer value per haemoglobin, mmol/L per unit of pH and g/dL. Measured. Source:
+/// [@lang2002, abstract].
 inline constexpr double k_buffer_per_hb = 1.63;
 
 /// Form for whole blood. Domain: usual::k_ct_hb_g_dL. Source: [@siggaard-andersen1960s, equation].

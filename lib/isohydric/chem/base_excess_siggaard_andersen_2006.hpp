@@ -16,8 +16,8 @@ inline constexpr double k_hb_of_no_weight_mmol_L = 43.0;
 inline constexpr double k_reference_hco3_mmol_L = 24.5;
 
 /// Buffer values per unit of pH: of haemoglobin and of albumin, 1; of globulin, mmol/g; of
-/// phosphate, 1. Measured. As a physiology library carries them. Source: [@siggaard-andersen2006,
-/// equation].
+/// phosphate, 1. Measured. As a physiology library carries them. Source:
+/// [@siggaard-andersen2006, equation].
 inline constexpr double k_buffer_per_hb = 2.3;
 inline constexpr double k_buffer_per_albumin = 8.0;
 inline constexpr double k_buffer_per_globulin = 0.075;

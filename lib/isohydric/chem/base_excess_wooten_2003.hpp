@@ -6,8 +6,8 @@
 
 namespace isohydric::chem::wooten_2003 {
 
-/// Reference bicarbonate, mmol/L. Unchecked: from memory. Source: [@wooten2003, base excess of
-/// plasma].
+/// Reference bicarbonate, mmol/L. Unchecked: from memory. Source:
+/// [@wooten2003, base excess of plasma].
 inline constexpr double k_reference_hco3_mmol_L = 24.4;
 
 /// Buffer value of albumin, 1 per unit of pH. Unchecked: from memory; a corrigendum exists and was

@@ -6,8 +6,8 @@
 
 namespace isohydric::chem::christiansen_1981 {
 
-/// Solubility of CO2, mmol/L/kPa. Measured. Source: [@christiansen1981, equation] in [@mentel,
-/// appendix].
+/// Solubility of CO2, mmol/L/kPa. Measured. Source: [@christiansen1981, equation] in
+/// [@mentel, appendix].
 inline constexpr double k_solubility_mmol_L_kPa = 0.23;
 
 /// pH at which bicarbonate equals dissolved CO2. Measured.

@@ -11,8 +11,8 @@ inline constexpr double k_body_temperature_degC = 37.0;
 /// pH of the definition of base excess. Defined. Source: [@siggaard-andersen1995, abstract].
 inline constexpr double k_reference_ph = 7.40;
 
-/// pCO2 of the definition of base excess, mmHg. Defined. Source: [@siggaard-andersen1995,
-/// abstract].
+/// pCO2 of the definition of base excess, mmHg. Defined. Source:
+/// [@siggaard-andersen1995, abstract].
 inline constexpr double k_reference_pco2_mmHg = 40.0;
 
 /// Kelvin temperature of 0 degC. Defined by the scale itself.

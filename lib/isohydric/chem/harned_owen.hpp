@@ -14,8 +14,8 @@ inline constexpr Domain k_temperature_K{273.15, 323.15};
 /// [@stumm1981, p. 127].
 inline constexpr double k_inverse_K = 4470.99;
 
-/// Constant term. Measured (fitted). As water-chemistry codes carry it. Source: [@stumm1981, p.
-/// 127].
+/// Constant term. Measured (fitted). As water-chemistry codes carry it. Source:
+/// [@stumm1981, p. 127].
 inline constexpr double k_constant = -6.0875;
 
 /// Coefficient of T, 1/K. Measured (fitted). As water-chemistry codes carry it. Source:

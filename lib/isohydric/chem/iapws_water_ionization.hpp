@@ -46,8 +46,8 @@ inline constexpr double k_hydration_number = 6.0;
 /// Molar mass of water, kg/mol, as the release fixes it. Defined. Source: [@iapws-r11-07, equation].
 inline constexpr double k_molar_mass_kg_mol = 18.015268e-3;
 
-/// Ideal-gas ionization: g0, g1 (K), g2 (K2), g3 (K3). Measured (fitted). Source: [@iapws-r11-07,
-/// table 1].
+/// Ideal-gas ionization: g0, g1 (K), g2 (K2), g3 (K3). Measured (fitted). Source:
+/// [@iapws-r11-07, table 1].
 inline constexpr double k_g0 = 6.141500e-1;
 inline constexpr double k_g1 = 4.825133e4;
 inline constexpr double k_g2 = -6.770793e4;
@@ -57,8 +57,8 @@ inline constexpr double k_g3 = 1.010210e7;
 inline constexpr double k_density_power = 2.0 / 3.0;
 
 /// Negative decimal logarithm of the ionization constant, mol2/kg2. Domain: k_temperature_K,
-/// k_density_g_cm3 above 0 (the limit at 0 is reached by any tiny density). Source: [@iapws-r11-07,
-/// equation] [@iapws-r11-24, equation].
+/// k_density_g_cm3 above 0 (the limit at 0 is reached by any tiny density). Source:
+/// [@iapws-r11-07, equation] [@iapws-r11-24, equation].
 template <num::Number T>
 [[nodiscard]] T pkw(const Coefficients& release, const T& temperature_K, const T& density_g_cm3) {
     const T inverse_K = 1.0 / temperature_K;

@@ -6,8 +6,8 @@
 namespace isohydric::chem::kassirer_bleich_1965 {
 
 /// nmol/L of hydrogen ion per mmHg of pCO2 over mmol/L of bicarbonate. Defined by the authors as a
-/// rounding; their own solubility 0.0301 and pK' 6.10 give 23.909. Source: [@kassirer1965,
-/// abstract].
+/// rounding; their own solubility 0.0301 and pK' 6.10 give 23.909. Source:
+/// [@kassirer1965, abstract].
 inline constexpr double k_factor = 24.0;
 
 /// Hydrogen ion, nmol/L. Domain: usual::k_pco2_mmHg, usual::k_hco3_mmol_L.

@@ -130,8 +130,8 @@ template <num::Number T>
 
 namespace zander {
 
-/// Solutes that the sum leaves out, mmol/L. Unchecked: from memory. Source: [@fazekas2013,
-/// formula].
+/// Solutes that the sum leaves out, mmol/L. Unchecked: from memory. Source:
+/// [@fazekas2013, formula].
 inline constexpr double k_others_mmol_L = 6.5;
 
 /// kg of water and osmotic activity per litre, together. Unchecked: from memory. Source:
@@ -161,8 +161,8 @@ template <num::Number T>
 /// The part of osmolality that ethanol makes.
 namespace ethanol {
 
-/// mOsm/kg per mmol/L. Ideal; a cohort of given doses found no more. Source: [@nguyen2020,
-/// abstract].
+/// mOsm/kg per mmol/L. Ideal; a cohort of given doses found no more. Source:
+/// [@nguyen2020, abstract].
 inline constexpr double k_ideal = 1.00;
 
 /// mOsm/kg per mmol/L. Measured. Source: [@fung, abstract].

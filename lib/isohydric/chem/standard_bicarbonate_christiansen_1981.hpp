@@ -29,8 +29,8 @@ inline constexpr double k_oxygen_per_hb = 0.3062;
 
 /// Standard bicarbonate, mmol/L, 37 degC; `base_excess_mmol_L` is that of a form without oxygen
 /// term. More than 1 mmol/L above the definition beyond a base excess of 12. Domain:
-/// usual::k_base_excess_mmol_L, usual::k_ct_hb_mmol_L, usual::k_so2. Source: [@christiansen1981,
-/// equation] in [@mentel, appendix].
+/// usual::k_base_excess_mmol_L, usual::k_ct_hb_mmol_L, usual::k_so2. Source:
+/// [@christiansen1981, equation] in [@mentel, appendix].
 template <num::Number T>
 [[nodiscard]] T
 standard_bicarbonate_mmol_L(const T& base_excess_mmol_L, const T& ct_hb_mmol_L, const T& so2) {
