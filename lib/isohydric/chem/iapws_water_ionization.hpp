@@ -43,12 +43,12 @@ inline constexpr Coefficients k_r11_24{.a0 = -0.702132,
 /// Hydration number of the ions. Defined. Source: [@iapws-r11-07, equation].
 inline constexpr double k_hydration_number = 6.0;
 
-/// Ideal-gas ionization: g0, g1 (K), g2 (K2), g3 (K3). Measured (fitted).
-/// Source: [@iapws-r11-07, table 1].
+/// Molar mass of water, kg/mol, as the release fixes it. Defined.
+/// Source: [@iapws-r11-07, equation].
 inline constexpr double k_molar_mass_kg_mol = 18.015268e-3;
 
-/// Ideal-gas ionization: g0, g1 (K), g2 (K2), g3 (K3). Measured (fitted). Source:
-/// [@iapws-r11-07, table 1].
+/// Ideal-gas ionization: g0, g1 (K), g2 (K2), g3 (K3). Measured (fitted).
+/// Source: [@iapws-r11-07, table 1].
 inline constexpr double k_g0 = 6.141500e-1;
 inline constexpr double k_g1 = 4.825133e4;
 inline constexpr double k_g2 = -6.770793e4;
