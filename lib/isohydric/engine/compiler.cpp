@@ -77,6 +77,15 @@ void Compiler::compile() {
                 expression(*group.domain);
             }
         }
+        for (const rule::Disorder& disorder : rules_.disorders) {
+            if (disorder.judged_when) {
+                expression(*disorder.judged_when);
+            }
+        }
+        for (std::uint32_t name_index = 0; name_index < rules_.interval_names.size();
+             ++name_index) {
+            interval(name_index);
+        }
     }
     program_.slots_ = emitter_.slots();
     program_.operations_ = emitter_.take();

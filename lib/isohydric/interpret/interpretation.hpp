@@ -33,6 +33,13 @@ struct CriticalValue {
     std::vector<rule::Citation> sources;
 };
 
+/// An entered value with the interval of its context.
+struct AnalyteResult {
+    panel::Analyte analyte{};
+    std::optional<double> low, high;
+    std::string interval_note;
+};
+
 struct QuantityResult {
     std::string name;
     std::string label;
@@ -102,8 +109,9 @@ struct ExplanationResult {
 };
 
 struct Interpretation {
-    std::shared_ptr<const rule::RuleSet> rules;
+    std::shared_ptr<const engine::Program> program;  ///< with the rule set that was in force
     panel::Panel panel;
+    std::vector<AnalyteResult> entered;
     std::vector<CheckResult> checks;
     bool interpretable = true;
     std::vector<CriticalValue> critical;
