@@ -75,9 +75,12 @@ Certainty certainty(bool always, bool never) {
 
 }  // namespace
 
-Interval::Interval(double lower, double upper)
-    : lower_(lower <= upper ? std::min(lower, k_largest) : -k_infinity),
-      upper_(lower <= upper ? std::max(upper, -k_largest) : k_infinity) {}
+Interval::Interval(double lower, double upper) : lower_(-k_infinity), upper_(k_infinity) {
+    if (lower <= upper) {
+        lower_ = std::min(lower, k_largest);
+        upper_ = std::max(upper, -k_largest);
+    }
+}
 
 Interval Interval::whole_line() {
     return {-k_infinity, k_infinity};

@@ -3,6 +3,8 @@
 #include <algorithm>
 #include <array>
 #include <charconv>
+#include <cstddef>
+#include <limits>
 #include <string_view>
 
 namespace isohydric::num {
@@ -12,7 +14,7 @@ namespace {
 /// The magnitude 0.d1d2d3... times 10^point, first and last digit not 0 (but for the value 0).
 struct Decimal {
     std::string digits;
-    int point;
+    std::ptrdiff_t point;
 };
 
 /// The shortest digits that read back as `magnitude`, which is finite and not negative.
@@ -32,7 +34,7 @@ Decimal shortest_decimal(double magnitude) {
 }
 
 /// Cuts after `count` digits, half away from zero; the carry may add a digit in front.
-void round_to_digits(Decimal& value, int count) {
+void round_to_digits(Decimal& value, std::ptrdiff_t count) {
     if (count < 0) {
         value.digits.clear();
         return;
@@ -60,7 +62,7 @@ void round_to_digits(Decimal& value, int count) {
 }
 
 /// Plain notation with exactly `decimals` digits after the point.
-std::string plain(Decimal value, int decimals) {
+std::string plain(Decimal value, std::ptrdiff_t decimals) {
     if (value.point < 1) {
         value.digits.insert(0, static_cast<std::size_t>(1 - value.point), '0');
         value.point = 1;
@@ -74,7 +76,7 @@ std::string plain(Decimal value, int decimals) {
 
 /// One digit before the point and a power of ten.
 std::string scientific(const Decimal& value) {
-    const int exponent = value.point - 1;
+    const std::ptrdiff_t exponent = value.point - 1;
     std::string text = value.digits.substr(0, 1);
     if (value.digits.size() > 1) {
         text += '.' + value.digits.substr(1);
@@ -100,7 +102,7 @@ std::string format_decimals(double value, int decimals) {
     if (!is_finite(value)) {
         return not_finite(value);
     }
-    const int places = std::max(decimals, 0);
+    const std::ptrdiff_t places = std::max(decimals, 0);
     Decimal magnitude = shortest_decimal(abs(value));
     round_to_digits(magnitude, magnitude.point + places);
     const std::string text = plain(magnitude, places);
@@ -113,10 +115,11 @@ std::string shortest(double value) {
         return not_finite(value);
     }
     const Decimal magnitude = shortest_decimal(abs(value));
-    const int size = static_cast<int>(magnitude.digits.size());
+    const auto size = static_cast<std::ptrdiff_t>(magnitude.digits.size());
     const bool is_plain = magnitude.point > -6 && magnitude.point <= 21;
     const std::string text =
-        is_plain ? plain(magnitude, std::max(size - magnitude.point, 0)) : scientific(magnitude);
+        is_plain ? plain(magnitude, std::max(size - magnitude.point, std::ptrdiff_t{0}))
+                 : scientific(magnitude);
     return value < 0.0 ? '-' + text : text;
 }
 
