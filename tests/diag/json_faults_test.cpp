@@ -4,7 +4,7 @@
 
 #include <doctest/doctest.h>
 
-#include <chrono>
+#include <ctime>
 #include <string>
 #include <vector>
 
@@ -182,12 +182,12 @@ TEST_CASE("json limits: many names, all different or all the same, take no quadr
     for (int i = 0; i < k_names; ++i) {
         text += ",\"name" + std::to_string(i) + "\":0,\"x\":0";
     }
-    const auto begin = std::chrono::steady_clock::now();
+    const std::clock_t begin = std::clock();
     const ReadText read(text + "}");
-    const std::chrono::duration<double> seconds = std::chrono::steady_clock::now() - begin;
+    const double processor_s = static_cast<double>(std::clock() - begin) / CLOCKS_PER_SEC;
     CHECK(read.report.error_count() == k_names);
     CHECK(render(read.report).size() < 100'000);
-    CHECK(seconds.count() < 30);  // compared pair by pair it is 8e10 comparisons
+    CHECK(processor_s < 20);  // compared pair by pair it is 8e10 comparisons
 }
 
 TEST_CASE("json limits: ten million bytes of text, of numbers, of faults") {

@@ -77,9 +77,6 @@ const Json* Json::find(std::string_view name) const {
 Place string_place(const Json& string_value, std::size_t begin, std::size_t end) {
     ISOHYDRIC_ASSERT(string_value.kind() == Kind::string);
     const Place& whole = string_value.place();
-    if (!whole) {
-        return {};
-    }
     const std::size_t closing_quote = whole.span.end - 1;
     const std::string_view text = std::string_view(whole.source->text()).substr(0, closing_quote);
     std::size_t at = whole.span.begin + 1;

@@ -72,7 +72,7 @@ struct Member {
     Json value;
 };
 
-/// Reads one JSON text [@rfc8259]. Beyond the standard, these are errors: a repeated name in an object, nesting deeper than
+/// Reads one JSON text [@rfc8259, section 2]. Beyond the standard, these are errors: a repeated name in an object, nesting deeper than
 /// 100, a number beyond the range of double, a byte order mark, an escaped surrogate without its partner. Gives nothing
 /// if the text has no readable structure; a tree that has repeated names only is given, so that its reader can report
 /// further faults, but the report then has errors.

@@ -1,8 +1,11 @@
 #include "isohydric/diag/render.hpp"
 
+#include "isohydric/diag/assert.hpp"
 #include "isohydric/diag/text.hpp"
 
 #include <algorithm>
+#include <array>
+#include <cstdint>
 
 #include <fmt/format.h>
 
@@ -19,22 +22,45 @@ struct Cell {
     std::size_t columns;
 };
 
-/// Whether the well-formed character at the front of `rest` would not be seen, or would disturb what is seen: controls,
-/// joiners, marks of direction, byte order marks.
-bool is_invisible(std::string_view rest) {
-    const auto lead = static_cast<unsigned char>(rest[0]);
-    const std::string_view two = rest.substr(0, 2);
-    const std::string_view three = rest.substr(0, 3);
-    return lead < 0x20 || lead == 0x7F || (two >= "\u0080" && two <= "\u009F") ||
-           (three >= "\u200B" && three <= "\u200F") || (three >= "\u2028" && three <= "\u202E") ||
-           (three >= "\u2060" && three <= "\u206F") || three == "\uFEFF";
+/// A range of code points, both ends included.
+struct CodePoints {
+    std::uint32_t first;
+    std::uint32_t last;
+};
+
+/// Characters that would not be seen, or would disturb what is seen: controls, joiners, marks of direction and of byte order.
+constexpr std::array<CodePoints, 6> k_invisible{{
+    {0x0000, 0x001F},
+    {0x007F, 0x009F},
+    {0x200B, 0x200F},
+    {0x2028, 0x202E},
+    {0x2060, 0x206F},
+    {0xFEFF, 0xFEFF},
+}};
+
+/// The code point of one well-formed UTF-8 sequence [@rfc3629, section 3].
+std::uint32_t code_point(std::string_view sequence) {
+    const std::uint32_t lead = static_cast<unsigned char>(sequence[0]);
+    std::uint32_t result = sequence.size() == 1 ? lead : lead & (0x7FU >> sequence.size());
+    for (const char tail : sequence.substr(1)) {
+        result = (result << 6U) | (static_cast<unsigned char>(tail) & 0x3FU);
+    }
+    return result;
+}
+
+bool is_invisible(std::string_view sequence) {
+    const std::uint32_t code = code_point(sequence);
+    return std::any_of(k_invisible.begin(), k_invisible.end(), [&](const CodePoints& range) {
+        return range.first <= code && code <= range.last;
+    });
 }
 
 /// The cell at the front of `rest`, which is not empty.
 Cell next_cell(std::string_view rest) {
     const std::size_t length = utf8_sequence_length(rest);
-    if (length > 0 && !is_invisible(rest)) {
-        return {length, std::string(rest.substr(0, length)), 1};
+    const std::string_view sequence = rest.substr(0, length);
+    if (length > 0 && !is_invisible(sequence)) {
+        return {length, std::string(sequence), 1};
     }
     return {1, fmt::format("\\x{:02X}", static_cast<unsigned char>(rest[0])), 4};
 }
@@ -118,7 +144,7 @@ std::string_view word(Severity severity) {
     case Severity::error:
         return "error";
     }
-    return {};
+    ISOHYDRIC_NEVER();
 }
 
 std::string entry(const Place& place, Severity severity, std::string_view message) {

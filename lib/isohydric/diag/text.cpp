@@ -111,7 +111,7 @@ std::size_t utf8_sequence_length(std::string_view text) {
                            text.begin() + static_cast<std::ptrdiff_t>(row.length),
                            is_tail);
     };
-    const auto row = std::find_if(k_utf8_rows.begin(), k_utf8_rows.end(), fits);
+    const auto* row = std::find_if(k_utf8_rows.begin(), k_utf8_rows.end(), fits);
     return row == k_utf8_rows.end() ? 0 : row->length;
 }
 

@@ -12,12 +12,6 @@ std::size_t skip_digits(std::string_view text, std::size_t at) {
     return std::min(text.find_first_not_of("0123456789", at), text.size());
 }
 
-/// Offset behind the digits that begin at `digits_begin`; `begin` if there are none.
-std::size_t skip_part(std::string_view text, std::size_t begin, std::size_t digits_begin) {
-    const std::size_t end = skip_digits(text, digits_begin);
-    return end > digits_begin ? end : begin;
-}
-
 bool has_one_of(std::string_view text, std::size_t at, std::string_view characters) {
     return at < text.size() && characters.find(text[at]) != std::string_view::npos;
 }
@@ -44,17 +38,16 @@ std::size_t string_end(std::string_view text, std::size_t begin) {
 }
 
 std::size_t number_end(std::string_view text, std::size_t begin) {
-    const std::size_t integer = has_one_of(text, begin, "-") ? begin + 1 : begin;
-    std::size_t end =
-        has_one_of(text, integer, "0") ? integer + 1 : skip_part(text, begin, integer);
-    if (end > begin && has_one_of(text, end, ".")) {
-        end = skip_part(text, end, end + 1);
+    std::size_t at = has_one_of(text, begin, "-") ? begin + 1 : begin;
+    at = has_one_of(text, at, "0") ? at + 1 : skip_digits(text, at);
+    if (has_one_of(text, at, ".")) {
+        at = skip_digits(text, at + 1);
     }
-    if (end > begin && has_one_of(text, end, "eE")) {
-        const std::size_t sign = has_one_of(text, end + 1, "+-") ? 1 : 0;
-        end = skip_part(text, end, end + 1 + sign);
+    if (has_one_of(text, at, "eE")) {
+        const std::size_t sign = has_one_of(text, at + 1, "+-") ? 1 : 0;
+        at = skip_digits(text, at + 1 + sign);
     }
-    return end;
+    return at;
 }
 
 std::optional<std::uint32_t> escaped_unit(std::string_view rest) {

@@ -30,7 +30,7 @@ struct SyntaxFault {
 /// Offset behind the correct string literal that begins at `begin`.
 [[nodiscard]] std::size_t string_end(std::string_view text, std::size_t begin);
 
-/// Offset behind the longest correct number that begins at `begin`.
+/// Offset behind the correct number that begins at `begin`.
 [[nodiscard]] std::size_t number_end(std::string_view text, std::size_t begin);
 
 /// The UTF-16 code unit that an escape `\uXXXX` at the front of `rest` stands for.
