@@ -99,15 +99,24 @@ class QuantityReader {
             quantity_.alternatives.push_back(
                 {"", read_expression(*formula, context_.names, wanted, context_.report)});
         } else if (first_of != nullptr) {
-            for (const diag::Json& item : first_of->items()) {
-                diag::ObjectReader reader(item, context_.report, "alternative");
-                std::string from = reader.required_text("from").value_or("");
-                quantity_.alternatives.push_back(
-                    {std::move(from), read_formula(reader, "formula", wanted, context_)});
-                reader.finish();
-            }
+            read_alternatives(*first_of, wanted);
         } else {
             read_model(*model, *inputs);
+        }
+    }
+
+    void read_alternatives(const diag::Json& first_of, const Wanted& wanted) {
+        if (first_of.items().empty()) {
+            context_.report.error("rule-quantity-value",
+                                  first_of.place(),
+                                  "\"firstOf\" is empty; give it one alternative at least");
+        }
+        for (const diag::Json& item : first_of.items()) {
+            diag::ObjectReader reader(item, context_.report, "alternative");
+            std::string from = reader.required_text("from").value_or("");
+            quantity_.alternatives.push_back(
+                {std::move(from), read_formula(reader, "formula", wanted, context_)});
+            reader.finish();
         }
     }
 
