@@ -28,7 +28,7 @@ TEST_CASE("rounding: a gap of 12 is 12") {
     CHECK(num::compare_at_8_decimals(0.1 + 0.2, 0.3) == 0);
 }
 
-TEST_CASE("rounding: the ninth decimal decides halves upwards") {
+TEST_CASE("rounding: the ninth decimal decides, halves upwards [@fhirpath-js, src/numbers.js]") {
     CHECK(num::compare_at_8_decimals(12.000000004, 12.0) == 0);
     CHECK(num::compare_at_8_decimals(12.000000006, 12.0) == 1);
     CHECK(num::compare_at_8_decimals(11.999999994, 12.0) == -1);
@@ -71,8 +71,7 @@ TEST_CASE("format: never minus zero") {
     CHECK(num::format_decimals(3.7, -2) == "4");
 }
 
-// The first table is of RFC 8785, appendix B.
-TEST_CASE("shortest: the examples of RFC 8785") {
+TEST_CASE("shortest: the table of examples [@rfc8785, appendix B]") {
     CHECK(num::shortest(0.0) == "0");
     CHECK(num::shortest(-0.0) == "0");
     CHECK(num::shortest(std::bit_cast<double>(std::uint64_t{0x0000000000000001})) == "5e-324");

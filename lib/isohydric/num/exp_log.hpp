@@ -1,6 +1,7 @@
 // Exponential, logarithm and power for double: one code for every machine, without libm.
-// Each is straight-line arithmetic with selects at its ends, so that a loop over an array vectorises
-// and gives the same bits as one call. The largest errors measured are in lib/README.md.
+// Each is straight-line arithmetic, so that a loop over an array vectorises and gives the same bits
+// as one call. Errors are in units of the last place, the largest measured against 50 digits on
+// 200,000 points each, edges included (tests/reference/num_mpmath.py, which also holds them to it).
 #pragma once
 
 #include "isohydric/num/wide.hpp"
@@ -180,26 +181,30 @@ inline constexpr Bits k_infinity_bits = std::bit_cast<Bits>(k_infinity);
 }  // namespace detail
 
 /// e^x; overflows to infinity, underflows through the subnormal numbers to 0.
+/// Error below 0.53, among subnormal results 0.75.
 [[nodiscard, gnu::always_inline]] inline double exp(double x) {
     return detail::exp_of(split(detail::clamp(x, -746.0, 710.0)));
 }
 
-/// 10^x; exact where the power is a double; overflow and underflow as for exp.
+/// 10^x; overflows and underflows as exp does.
+/// Error below 0.53, among subnormal results 0.75. For a whole x from -323 to 308 the nearest double
+/// (so exact where one is) but at 126 and 210, which are the next to nearest.
 [[nodiscard, gnu::always_inline]] inline double pow10(double x) {
     return detail::exp_of(split(detail::clamp(x, -323.9, 308.3)) * detail::k_ln10);
 }
 
-/// Natural logarithm; -infinity at 0, NaN below.
+/// Natural logarithm; -infinity at 0, NaN below. Error below 0.501.
 [[nodiscard, gnu::always_inline]] inline double log(double x) {
     return detail::log_of(x).rounded() + detail::log_edge(x);
 }
 
-/// Logarithm to base 10, exact at powers of ten; -infinity at 0, NaN below.
+/// Logarithm to base 10, exact at powers of ten; -infinity at 0, NaN below. Error below 0.501.
 [[nodiscard, gnu::always_inline]] inline double log10(double x) {
     return (detail::log_of(x) * detail::k_log10_e).rounded() + detail::log_edge(x);
 }
 
-/// x^y for x >= 0; NaN below, also with a whole y. x^0 is 1 for every x, as in IEEE 754.
+/// x^y for x >= 0; NaN below, also with a whole y. x^0 is 1 for every x, as in [@ieee754-2019, clause 9.2.1].
+/// Error below 0.53, among subnormal results 0.75.
 [[nodiscard, gnu::always_inline]] inline double pow(double x, double y) {
     constexpr double k_beyond_any_use = 0x1p64;
     const Wide exponent =

@@ -21,8 +21,8 @@ namespace detail {
 
 }  // namespace detail
 
-/// `x` to the nearest multiple of 1e-8, halves upwards, by the operations that HL7's FHIRPath engine
-/// (fhirpath.js) does before it compares, so to the same bits. Not decreasing in `x`; infinite above
+/// `x` to the nearest multiple of 1e-8, halves upwards, by the operations that HL7's FHIRPath engine does
+/// before it compares, so to the same bits [@fhirpath-js, src/numbers.js]. Not decreasing in `x`; infinite above
 /// about 1.8e300; NaN for NaN. For comparison, not for print: a result may be one bit off the decimal.
 [[nodiscard, gnu::always_inline]] inline double round_to_8_decimals(double x) {
     constexpr double k_step = 1e-8;
@@ -41,8 +41,8 @@ namespace detail {
 /// that reads back as `value`, half away from zero: 2.675 to two decimals is 2.68. Never "-0".
 [[nodiscard]] std::string format_decimals(double value, int decimals);
 
-/// The shortest text that reads back as `value`, in the form of ECMAScript's Number::toString, which
-/// RFC 8785 prescribes for JSON. "NaN", "Infinity" and "-Infinity" have no place in JSON.
+/// The shortest text that reads back as `value`, in the form [@ecma262, Number::toString] prescribed for
+/// canonical JSON [@rfc8785, section 3.2.2.3]. "NaN", "Infinity" and "-Infinity" have no place in JSON.
 [[nodiscard]] std::string shortest(double value);
 
 }  // namespace isohydric::num
