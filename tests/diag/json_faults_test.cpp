@@ -1,5 +1,5 @@
-// What the JSON reader refuses, where it points and what it says. Which texts are JSON is checked against another parser in
-// tests/reference/json_against_node.mjs; here it is places and words.
+// What the JSON reader refuses, where it points and what it says. Which texts are JSON is checked
+// against another parser in tests/reference/json_against_node.mjs; here it is places and words.
 #include "isohydric/diag/render.hpp"
 
 #include <doctest/doctest.h>
@@ -10,8 +10,9 @@
 
 #include "read_text.hpp"
 
-using namespace isohydric::diag;
-using namespace std::string_literals;
+namespace isohydric::diag {
+
+using std::string_literals::operator""s;
 
 namespace {
 
@@ -204,3 +205,5 @@ TEST_CASE("json limits: ten million bytes of text, of numbers, of faults") {
     CHECK(render(word.report).size() < 1000);
     static_assert(sizeof(Json) <= 80);
 }
+
+}  // namespace isohydric::diag

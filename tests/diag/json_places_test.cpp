@@ -9,8 +9,7 @@
 
 #include "read_text.hpp"
 
-using namespace isohydric::diag;
-
+namespace isohydric::diag {
 namespace {
 
 const Json& member(const Json& object, std::string_view name) {
@@ -201,3 +200,5 @@ TEST_CASE("string place: offsets behind the string mean its end, inside the quot
     CHECK(string_place(*read.json, 99, 120).span == Span{3, 3});
     CHECK(string_place(*read.json, 1, 0).span == Span{2, 2});
 }
+
+}  // namespace isohydric::diag

@@ -8,8 +8,7 @@
 
 #include "read_text.hpp"
 
-using namespace isohydric::diag;
-
+namespace isohydric::diag {
 namespace {
 
 /// An object being read as an interval; the text must be JSON.
@@ -134,3 +133,5 @@ TEST_CASE("object reader: a hundred thousand unknown names are all counted") {
     interval.reader.finish();
     CHECK(interval.read.report.error_count() == 100'000);
 }
+
+}  // namespace isohydric::diag

@@ -1,12 +1,12 @@
-// How diagnostics look: every expected text below was written by hand from the shape that render.hpp states.
+// How diagnostics look: every expected text below was written by hand from the shape that
+// render.hpp states.
 #include "isohydric/diag/render.hpp"
 
 #include <doctest/doctest.h>
 
 #include <string>
 
-using namespace isohydric::diag;
-
+namespace isohydric::diag {
 namespace {
 
 /// The excerpt below the head line of an error at a span of a text.
@@ -132,3 +132,5 @@ TEST_CASE("render: a report shows a hundred and counts the rest") {
     CHECK(text.ends_with("warning: m [w]\n2 more not shown, 1 of them errors\n"));
     CHECK(render(Report()).empty());
 }
+
+}  // namespace isohydric::diag

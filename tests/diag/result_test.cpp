@@ -6,8 +6,7 @@
 #include <memory>
 #include <string>
 
-using namespace isohydric::diag;
-
+namespace isohydric::diag {
 namespace {
 
 Result<int> half(int number) {
@@ -80,3 +79,5 @@ TEST_CASE("assert: says file, line and condition; passes silently if it holds") 
         CHECK(what.find("1 + 1 == 3") != std::string::npos);
     }
 }
+
+}  // namespace isohydric::diag

@@ -7,7 +7,7 @@
 
 #include <string>
 
-using namespace isohydric::diag;
+namespace isohydric::diag {
 
 TEST_CASE("source: positions count lines and columns from 1, columns in bytes") {
     const auto source = make_source("a.json", "one\ntw\xC3\xB6!\n\nend");
@@ -93,3 +93,5 @@ TEST_CASE("report: the first 10,000 are kept and all are counted") {
     CHECK(report.error_count() == 1);
     CHECK(report.has_errors());
 }
+
+}  // namespace isohydric::diag

@@ -7,15 +7,15 @@
 #include <string>
 #include <vector>
 
-using namespace isohydric::diag;
-
+namespace isohydric::diag {
 namespace {
 
 char byte(std::uint32_t value) {
     return static_cast<char>(static_cast<unsigned char>(value));
 }
 
-/// Encodes by the bit pattern of RFC 3629, section 3, with a given number of bytes (1 to 4), well-formed or not.
+/// Encodes by the bit pattern of RFC 3629, section 3, with a given number of bytes (1 to 4),
+/// well-formed or not.
 std::string encode(std::uint32_t code_point, std::size_t length) {
     constexpr std::array<std::uint32_t, 5> k_lead{0, 0x00, 0xC0, 0xE0, 0xF0};
     std::string result(length, '\0');
@@ -115,3 +115,5 @@ TEST_CASE("text: trim, lower, join") {
     CHECK(join(k_names, ", ") == "pCO2, pO2, HCO3, albumin, lactate, Na, K");
     CHECK(join({}, ", ").empty());
 }
+
+}  // namespace isohydric::diag

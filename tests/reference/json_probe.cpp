@@ -1,5 +1,5 @@
-// Reads JSON texts, one a line in hexadecimal, and writes for each what read_json made of it, as one line of JSON, for
-// json_against_node.mjs to compare.
+// Reads JSON texts, one a line in hexadecimal, and writes for each what read_json made of it, as
+// one line of JSON, for json_against_node.mjs to compare.
 #include "isohydric/diag/json.hpp"
 
 #include <bit>
@@ -8,12 +8,12 @@
 #include <iostream>
 #include <string>
 #include <string_view>
+#include <utility>
 
 #include <fmt/format.h>
 
+namespace isohydric::diag {
 namespace {
-
-using namespace isohydric::diag;
 
 std::string hex(std::string_view bytes) {
     std::string result = "\"";
@@ -75,19 +75,25 @@ std::string value_as_json(const Json& value) {
         R"(["{}",{},{}])", describe(value.kind()), at_place(value.place()), content_as_json(value));
 }
 
+/// The answer to one text.
+std::string answer(std::string text) {
+    Report report;
+    const auto json = read_json(make_source("input", std::move(text)), report);
+    std::string ids;
+    for (const Diagnostic& each : report.diagnostics()) {
+        ids += fmt::format("{}\"{}\"", ids.empty() ? "" : ",", each.id);
+    }
+    return fmt::format(
+        "{{\"errors\":[{}],\"value\":{}}}\n", ids, json ? value_as_json(*json) : "null");
+}
+
 }  // namespace
+}  // namespace isohydric::diag
 
 int main() {
     std::string line;
     while (std::getline(std::cin, line)) {
-        Report report;
-        const auto json = read_json(make_source("input", unhex(line)), report);
-        std::string ids;
-        for (const Diagnostic& each : report.diagnostics()) {
-            ids += fmt::format("{}\"{}\"", ids.empty() ? "" : ",", each.id);
-        }
-        std::cout << fmt::format(
-            "{{\"errors\":[{}],\"value\":{}}}\n", ids, json ? value_as_json(*json) : "null");
+        std::cout << isohydric::diag::answer(isohydric::diag::unhex(line));
     }
     return 0;
 }

@@ -1,4 +1,5 @@
-// Assertions for our own mistakes: they throw in every build, so that a wrong program says so instead of answering.
+// Assertions for our own mistakes: they throw in every build, so that a wrong program says so
+// instead of answering.
 #pragma once
 
 #include <stdexcept>

@@ -1,6 +1,6 @@
-// JSON with places: a value tree in which every value and every name knows where in the text it stands, so that whoever
-// reads a rule or a panel can point at the very characters that are wrong; and a reader of objects that reports what is
-// missing, of the wrong kind, or unknown.
+// JSON with places: a value tree in which every value and every name knows where in the text it
+// stands, so that whoever reads a rule or a panel can point at the very characters that are wrong;
+// and a reader of objects that reports what is missing, of the wrong kind, or unknown.
 #pragma once
 
 #include "isohydric/diag/report.hpp"
@@ -24,8 +24,8 @@ enum class Kind { null, boolean, number, string, array, object };
 
 struct Member;
 
-/// A JSON value. Asking a value for what its kind does not have is our own mistake (InternalError); ask `kind()` first,
-/// or read through ObjectReader.
+/// A JSON value. Asking a value for what its kind does not have is our own mistake (InternalError);
+/// ask `kind()` first, or read through ObjectReader.
 class Json {
   public:
     /// A null without a place.
@@ -33,12 +33,14 @@ class Json {
 
     [[nodiscard]] Kind kind() const { return static_cast<Kind>(content_.index()); }
 
-    /// The characters of the value; of a string with its quotes, of an array or object with its brackets.
+    /// The characters of the value; of a string with its quotes, of an array or object with its
+    /// brackets.
     [[nodiscard]] const Place& place() const { return place_; }
 
     [[nodiscard]] bool as_bool() const;
 
-    /// The decoded content of a string, or the characters of a number exactly as they stand in the text.
+    /// The decoded content of a string, or the characters of a number exactly as they stand in the
+    /// text.
     [[nodiscard]] std::string_view text() const;
 
     /// The nearest double; finite.
@@ -72,27 +74,30 @@ struct Member {
     Json value;
 };
 
-/// Reads one JSON text [@rfc8259, section 2]. Beyond the standard, these are errors: a repeated name in an object, nesting deeper than
-/// 100, a number beyond the range of double, a byte order mark, an escaped surrogate without its partner. Gives nothing
-/// if the text has no readable structure; a tree that has repeated names only is given, so that its reader can report
-/// further faults, but the report then has errors.
+/// Reads one JSON text [@rfc8259, section 2]. Beyond the standard, these are errors: a repeated
+/// name in an object, nesting deeper than 100, a number beyond the range of double, a byte order
+/// mark, an escaped surrogate without its partner. Gives nothing if the text has no readable
+/// structure; a tree that has repeated names only is given, so that its reader can report further
+/// faults, but the report then has errors.
 [[nodiscard]] std::optional<Json> read_json(std::shared_ptr<const Source> source, Report& report);
 
-/// The place of the decoded bytes `[begin, end)` of a string, inside its quotes. Offsets behind the string mean its end.
+/// The place of the decoded bytes `[begin, end)` of a string, inside its quotes. Offsets behind the
+/// string mean its end.
 [[nodiscard]] Place string_place(const Json& string_value, std::size_t begin, std::size_t end);
 
-/// Reads one object. Every name asked for is thereby known; `finish()` reports the members that nobody asked for. The
-/// object and the report must outlive the reader.
+/// Reads one object. Every name asked for is thereby known; `finish()` reports the members that
+/// nobody asked for. The object and the report must outlive the reader.
 class ObjectReader {
   public:
-    /// `what` names the object in messages: `interval`. Another kind of value than an object is reported at once; all
-    /// questions then find nothing and report nothing more.
+    /// `what` names the object in messages: `interval`. Another kind of value than an object is
+    /// reported at once; all questions then find nothing and report nothing more.
     ObjectReader(const Json& object, Report& report, std::string what);
 
     /// The member; reports one that is missing or of another kind, and gives null then.
     const Json* required(std::string_view name, Kind kind);
 
-    /// The member, or null where it is missing or null; reports one of another kind, and gives null then.
+    /// The member, or null where it is missing or null; reports one of another kind, and gives null
+    /// then.
     const Json* optional(std::string_view name, Kind kind);
 
     /// The member of whatever kind, or null where it is missing.
@@ -129,7 +134,8 @@ class ObjectReader {
     std::vector<std::string> asked_;
 };
 
-/// Reports `json-wrong-kind` and gives false unless the value has the kind; `what` names it in the message.
+/// Reports `json-wrong-kind` and gives false unless the value has the kind; `what` names it in the
+/// message.
 bool expect_kind(const Json& value, Kind kind, std::string_view what, Report& report);
 
 }  // namespace isohydric::diag

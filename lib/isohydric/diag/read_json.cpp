@@ -1,5 +1,5 @@
-// The JSON reader: a general-purpose parser checks the text and decodes it; the builder follows its steps on the text and
-// gives every value its place.
+// The JSON reader: a general-purpose parser checks the text and decodes it; the builder follows its
+// steps on the text and gives every value its place.
 #include "isohydric/diag/assert.hpp"
 #include "isohydric/diag/detail/json_grammar.hpp"
 #include "isohydric/diag/json.hpp"

@@ -28,7 +28,8 @@ struct CodePoints {
     std::uint32_t last;
 };
 
-/// Characters that would not be seen, or would disturb what is seen: controls, joiners, marks of direction and of byte order.
+/// Characters that would not be seen, or would disturb what is seen: controls, joiners, marks of
+/// direction and of byte order.
 constexpr std::array<CodePoints, 6> k_invisible{{
     {0x0000, 0x001F},
     {0x007F, 0x009F},
@@ -79,7 +80,8 @@ std::size_t character_begin(std::string_view line, std::size_t at) {
     return at;
 }
 
-/// The part of a line that is shown: all of a short one, and what lies around the caret of a long one.
+/// The part of a line that is shown: all of a short one, and what lies around the caret of a long
+/// one.
 Span window(std::string_view line, std::size_t caret) {
     if (line.size() <= k_window_bytes) {
         return {0, line.size()};
@@ -89,7 +91,8 @@ Span window(std::string_view line, std::size_t caret) {
     return {character_begin(line, begin), character_begin(line, begin + k_window_bytes)};
 }
 
-/// What stands below one cell: nothing before the span, the caret at its begin, tildes under the rest.
+/// What stands below one cell: nothing before the span, the caret at its begin, tildes under the
+/// rest.
 std::string mark(const Cell& cell, bool is_tab, std::size_t at, Span span) {
     if (at + cell.bytes <= span.begin) {
         return is_tab ? "\t" : std::string(cell.columns, ' ');

@@ -1,5 +1,5 @@
-// Diagnostics as text, without colour: `file:line:column: error: message [id]`, the source line, a caret under the
-// place; then the notes in the same shape.
+// Diagnostics as text, without colour: `file:line:column: error: message [id]`, the source line, a
+// caret under the place; then the notes in the same shape.
 #pragma once
 
 #include "isohydric/diag/report.hpp"

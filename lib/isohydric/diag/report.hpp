@@ -1,4 +1,5 @@
-// Report: what readers have to say about a text. Readers add to it and go on, so that one run tells of every fault.
+// Report: what readers have to say about a text. Readers add to it and go on, so that one run tells
+// of every fault.
 #pragma once
 
 #include "isohydric/diag/source.hpp"
@@ -19,8 +20,8 @@ struct Note {
     Place place;
 };
 
-/// One message. `id` is kebab-case, stable, and has its row in rules/DIAGNOSTICS.md; `message` says what is wrong, what
-/// was found and what to do, without a full stop.
+/// One message. `id` is kebab-case, stable, and has its row in rules/DIAGNOSTICS.md; `message` says
+/// what is wrong, what was found and what to do, without a full stop.
 struct Diagnostic {
     Severity severity = Severity::error;
     std::string id;
@@ -29,12 +30,12 @@ struct Diagnostic {
     std::vector<Note> notes;
 };
 
-/// Gathers diagnostics in the order in which they were found. The first 10,000 are kept and the rest only counted, so that a
-/// hostile text cannot fill the memory.
+/// Gathers diagnostics in the order in which they were found. The first 10,000 are kept and the
+/// rest only counted, so that a hostile text cannot fill the memory.
 class Report {
   public:
-    /// Adds a diagnostic. The reference stays valid as long as the report, so that notes can be added to it; of a
-    /// diagnostic that is only counted it is valid until the next one is added.
+    /// Adds a diagnostic. The reference stays valid as long as the report, so that notes can be
+    /// added to it; of a diagnostic that is only counted it is valid until the next one is added.
     Diagnostic& add(Diagnostic diagnostic);
     Diagnostic& error(std::string id, Place place, std::string message);
     Diagnostic& warning(std::string id, Place place, std::string message);

@@ -1,10 +1,11 @@
-// Result: a value or the reason why there is none. Its members are a subset of std::expected's, so that it can become
-// an alias of that once every compiler in use has it.
+// Result: a value or the reason why there is none. Its members are a subset of std::expected's, so
+// that it can become an alias of that once every compiler in use has it.
 #pragma once
 
 #include "isohydric/diag/assert.hpp"
 
 #include <concepts>
+#include <cstddef>
 #include <string>
 #include <type_traits>
 #include <utility>
@@ -24,17 +25,19 @@ template <class E>
     return {std::forward<E>(error)};
 }
 
-/// A T, or an E that says why not. Asking for the side that is not there is our own mistake (InternalError).
+/// A T, or an E that says why not. Asking for the side that is not there is our own mistake
+/// (InternalError).
 template <class T, class E = std::string>
 class [[nodiscard]] Result {
   public:
+    // A Result is not convertible to its T, so copies and moves never come here.
     template <std::convertible_to<T> U = T>
-    Result(U&& value)  // NOLINT(google-explicit-constructor): as std::expected
-        : content_(std::in_place_index<0>, std::forward<U>(value)) {}
+    // NOLINTNEXTLINE(google-explicit-constructor, bugprone-forwarding-reference-overload)
+    Result(U&& value) : content_(std::in_place_index<0>, std::forward<U>(value)) {}
 
     template <std::convertible_to<E> G>
-    Result(Unexpected<G> failure)  // NOLINT(google-explicit-constructor): as std::expected
-        : content_(std::in_place_index<1>, std::move(failure.error)) {}
+    // NOLINTNEXTLINE(google-explicit-constructor): as std::expected
+    Result(Unexpected<G> failure) : content_(std::in_place_index<1>, std::move(failure.error)) {}
 
     [[nodiscard]] bool has_value() const noexcept { return content_.index() == 0; }
 
@@ -68,9 +71,9 @@ class [[nodiscard]] Result {
     }
 
   private:
-    template <std::size_t index, class Content>
+    template <std::size_t Index, class Content>
     static auto& side(Content& content) {
-        auto* found = std::get_if<index>(&content);
+        auto* found = std::get_if<Index>(&content);
         ISOHYDRIC_ASSERT(found != nullptr);
         return *found;
     }

@@ -1,5 +1,5 @@
-// Source text and places in it. Everything that was read keeps its place, so that a message written much later can
-// still point at file, line and column.
+// Source text and places in it. Everything that was read keeps its place, so that a message written
+// much later can still point at file, line and column.
 #pragma once
 
 #include <cstddef>

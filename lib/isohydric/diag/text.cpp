@@ -11,8 +11,8 @@ namespace {
 
 constexpr std::size_t k_longest_word = 64;  // bounds the work on hostile names
 
-/// Steps from one word to another; neighbours swap in one step, and no piece is changed twice (the "optimal string
-/// alignment" form of the Damerau-Levenshtein distance).
+/// Steps from one word to another; neighbours swap in one step, and no piece is changed twice (the
+/// "optimal string alignment" form of the Damerau-Levenshtein distance).
 std::size_t distance(std::string_view from, std::string_view to) {
     std::vector<std::size_t> before_last(to.size() + 1);
     std::vector<std::size_t> last(to.size() + 1);
@@ -54,7 +54,8 @@ std::string nearest_of(std::string_view wanted, std::span<const Word> candidates
     return best;
 }
 
-/// One row of the table of well-formed sequences of more than one byte; all bytes behind the second are 80..BF.
+/// One row of the table of well-formed sequences of more than one byte; all bytes behind the second
+/// are 80..BF.
 struct Utf8Row {
     unsigned char lead_low;
     unsigned char lead_high;

@@ -1,4 +1,5 @@
-// Small helpers for text: the nearest known word, UTF-8, trimming, joining. All of them are blind to the locale.
+// Small helpers for text: the nearest known word, UTF-8, trimming, joining. All of them are blind
+// to the locale.
 #pragma once
 
 #include <cstddef>
@@ -10,9 +11,10 @@
 
 namespace isohydric::diag {
 
-/// The candidate nearest to `wanted`, for "did you mean"; empty if none is near enough. Letters count without case;
-/// an insertion, deletion, replacement or swap of neighbours is one step, and a third of the word's length, at most 3,
-/// is near enough. Of equally near candidates the first wins.
+/// The candidate nearest to `wanted`, for "did you mean"; empty if none is near enough. Letters
+/// count without case; an insertion, deletion, replacement or swap of neighbours is one step, and a
+/// third of the word's length, at most 3, is near enough. Of equally near candidates the first
+/// wins.
 [[nodiscard]] std::string nearest(std::string_view wanted, std::span<const std::string> candidates);
 [[nodiscard]] std::string nearest(std::string_view wanted,
                                   std::span<const std::string_view> candidates);
@@ -21,7 +23,8 @@ namespace isohydric::diag {
 [[nodiscard]] std::string did_you_mean(std::string_view wanted,
                                        std::span<const std::string> candidates);
 
-/// Length in bytes of the well-formed UTF-8 sequence at the front of `text`; 0 if there is none [@rfc3629, section 4].
+/// Length in bytes of the well-formed UTF-8 sequence at the front of `text`; 0 if there is none
+/// [@rfc3629, section 4].
 [[nodiscard]] std::size_t utf8_sequence_length(std::string_view text);
 
 /// Offset of the first byte that is not part of well-formed UTF-8.

@@ -1,4 +1,5 @@
-// Plain words for JSON syntax errors: what could stand at the place, what stands there, and how it is usually meant.
+// Plain words for JSON syntax errors: what could stand at the place, what stands there, and how it
+// is usually meant.
 #include "isohydric/diag/assert.hpp"
 #include "isohydric/diag/detail/json_grammar.hpp"
 #include "isohydric/diag/text.hpp"
