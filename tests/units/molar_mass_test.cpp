@@ -7,7 +7,7 @@
 #include <cmath>
 #include <string_view>
 
-using namespace isohydric;
+namespace units = isohydric::units;
 using units::Unit;
 
 namespace {
@@ -17,7 +17,7 @@ Unit unit(std::string_view code) {
 }
 
 /// mmol/L in 1 mg/dL.
-double mmol_L_in_mg_dL(std::string_view substance) {
+double millimoles_per_litre(std::string_view substance) {
     const double mass_g_mol = units::molar_mass_g_mol(substance).value();
     return units::factor_by_molar_mass(unit("mg/dL"), unit("mmol/L"), mass_g_mol).value();
 }
@@ -41,16 +41,16 @@ TEST_CASE("molar mass: of formulas, as a national table of units prints them "
 
 TEST_CASE("molar mass: conversions in use agree within 0.3 % [@regenstrief-unit-equations-2017, "
           "equations]") {
-    CHECK(within(mmol_L_in_mg_dL("calcium"), 1 / 4.008, 0.003));
-    CHECK(within(mmol_L_in_mg_dL("creatinine"), 0.1 / 1.131, 0.003));
-    CHECK(within(mmol_L_in_mg_dL("glucose"), 1 / 18.02, 0.003));
-    CHECK(within(mmol_L_in_mg_dL("magnesium"), 1 / 2.431, 0.003));
-    CHECK(within(mmol_L_in_mg_dL("phosphorus"), 1 / 3.097, 0.003));
-    CHECK(within(mmol_L_in_mg_dL("ethanol"), 1 / 4.607, 0.003));
+    CHECK(within(millimoles_per_litre("calcium"), 1 / 4.008, 0.003));
+    CHECK(within(millimoles_per_litre("creatinine"), 0.1 / 1.131, 0.003));
+    CHECK(within(millimoles_per_litre("glucose"), 1 / 18.02, 0.003));
+    CHECK(within(millimoles_per_litre("magnesium"), 1 / 2.431, 0.003));
+    CHECK(within(millimoles_per_litre("phosphorus"), 1 / 3.097, 0.003));
+    CHECK(within(millimoles_per_litre("ethanol"), 1 / 4.607, 0.003));
 }
 
 TEST_CASE("molar mass: lactate takes the customary 9.008 mg/dL per mmol/L, common practice") {
-    CHECK(std::abs(1 / mmol_L_in_mg_dL("lactate") - 9.008) < 0.0005);
+    CHECK(std::abs(1 / millimoles_per_litre("lactate") - 9.008) < 0.0005);
 }
 
 TEST_CASE("molar mass: urea is 60.06 and nitrogen 28.01 of it, common practice") {

@@ -7,7 +7,7 @@
 #include <string>
 #include <string_view>
 
-using namespace isohydric;
+namespace units = isohydric::units;
 using units::Censoring;
 using units::DecimalMark;
 using units::parse_number;
@@ -43,11 +43,7 @@ TEST_CASE("number: what people write is read with its last digit") {
         {"1.5E-3", 0.0015, 4, "1.5e-3"},
         {"2e+1", 20, -1, "2e1"},
         {" 7.4\t", 7.4, 1, "7.4"},
-        {"\u00a0"
-         "7.4",
-         7.4,
-         1,
-         "7.4"},
+        {"\u00a07.4", 7.4, 1, "7.4"},
         {"0,123", 0.123, 3, "0.123"},
         {"1234,567", 1234.567, 3, "1234.567"},
         {"1.234", 1.234, 3, "1.234"},
@@ -67,38 +63,12 @@ TEST_CASE("number: what people write is read with its last digit") {
 }
 
 TEST_CASE("number: anything else is refused") {
-    for (const std::string_view text : {"",
-                                        " ",
-                                        "1,234.5",
-                                        "1.234,5",
-                                        "7..2",
-                                        "7.",
-                                        "7,",
-                                        ".",
-                                        "-",
-                                        "+",
-                                        "--5",
-                                        "+-5",
-                                        "0x10",
-                                        "nan",
-                                        "inf",
-                                        "-inf",
-                                        "NaN",
-                                        "abc",
-                                        "7.2.1",
-                                        "7 .2",
-                                        "1e",
-                                        "e5",
-                                        "1e400",
-                                        "1e-400",
-                                        "1e99999999999",
-                                        "1 234",
-                                        "1\u2009"
-                                        "234",
-                                        "5-",
-                                        "1'234",
-                                        "<0.5",
-                                        "5%"}) {
+    for (const std::string_view text :
+         {"",      " ",     "1,234.5", "1.234,5",       "7..2",  "7.",         "7,",
+          ".",     "-",     "+",       "--5",           "+-5",   "0x10",       "nan",
+          "inf",   "-inf",  "NaN",     "abc",           "7.2.1", "7 .2",       "1e",
+          "e5",    "1e400", "1e-400",  "1e99999999999", "1 234", "1\u2009234", "5-",
+          "1'234", "<0.5",  "5%"}) {
         CAPTURE(text);
         CHECK_FALSE(parse_number(text).has_value());
     }
@@ -182,8 +152,7 @@ TEST_CASE("quantity: what goes on like a number, or has no number, is refused") 
                                         "1,234 mmol/L",
                                         "1,234.5 mmol/L",
                                         "12 345 mmol/L",
-                                        "1\u2009"
-                                        "234",
+                                        "1\u2009234",
                                         "4-5 kPa",
                                         "4 -5",
                                         "4\u22125",

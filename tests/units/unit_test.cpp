@@ -8,8 +8,11 @@
 #include <cmath>
 #include <limits>
 #include <string>
+#include <string_view>
+#include <utility>
 
-using namespace isohydric;
+namespace diag = isohydric::diag;
+namespace units = isohydric::units;
 using units::Unit;
 
 namespace {
@@ -55,13 +58,13 @@ TEST_CASE("unit: 1 psi is 6894.757 Pa, 1 mmH2O is 9.80665 Pa [@nist-sp811, appen
     CHECK(ratio("mm[H2O]", "Pa") == 9.80665);
 }
 
-TEST_CASE("unit: 40 mmHg is 5.33 kPa, 750 mmHg is within 1e-4 of 100 kPa at 7.50062 mmHg in a kPa, "
-          "common practice") {
+TEST_CASE("unit: 40 mmHg is 5.33 kPa and a kPa is 7.50062 mmHg, common practice") {
     CHECK(prints_as(converted(40, "mm[Hg]", "kPa"), 5.33, 0.005));
     CHECK(prints_as(ratio("kPa", "mm[Hg]"), 7.50062, 0.000005));
 }
 
-TEST_CASE("unit: decimal ratios are exact, by definition of the prefixes [@ucum, section 4.1]") {
+TEST_CASE("unit: decimal ratios are exact, by definition of the prefixes [@ucum, section "
+          "4.1]") {
     CHECK(ratio("g/dL", "g/L") == 10);
     CHECK(ratio("mmol/L", "umol/L") == 1000);
     CHECK(ratio("umol/L", "mmol/L") == 0.001);

@@ -41,6 +41,10 @@ std::string quoted(std::string_view text) {
     return fmt::format("\"{}{}\"", text.substr(0, end), end < text.size() ? "..." : "");
 }
 
+diag::Unexpected<std::string> refusal(std::string_view text, std::string_view reason) {
+    return diag::unexpected(fmt::format("{} cannot be read: {}", quoted(text), reason));
+}
+
 /// Takes the first of the words that `text` begins with off its front.
 template <std::size_t Size>
 std::string_view take_any(std::string_view& text, const std::array<std::string_view, Size>& words) {
@@ -210,48 +214,43 @@ std::optional<std::string_view> without_quotes(std::string_view unit) {
 }  // namespace
 
 diag::Result<NumberText> parse_number(std::string_view text, DecimalMark decimal_mark) {
-    const auto refuse = [&](std::string_view reason) {
-        return diag::unexpected(fmt::format("{} cannot be read: {}", quoted(text), reason));
-    };
     const std::string_view trimmed = trim_spaces(text);
     const auto parts = scan(trimmed, decimal_mark);
     if (!parts) {
-        return refuse(parts.error());
+        return refusal(text, parts.error());
     }
     if (parts->length != trimmed.size()) {
-        return refuse(fmt::format("{} follows the number", quoted(trimmed.substr(parts->length))));
+        return refusal(text,
+                       fmt::format("{} follows the number", quoted(trimmed.substr(parts->length))));
     }
     auto number = number_of(*parts);
     if (!number) {
-        return refuse(number.error());
+        return refusal(text, number.error());
     }
     return number;
 }
 
 diag::Result<QuantityText> split_quantity(std::string_view text, DecimalMark decimal_mark) {
-    const auto refuse = [&](std::string_view reason) {
-        return diag::unexpected(fmt::format("{} cannot be read: {}", quoted(text), reason));
-    };
     QuantityText quantity;
     std::string_view rest = trim_spaces(text);
     quantity.censoring = take_censoring(rest);
     rest = trim_spaces(rest);
     const auto parts = scan(rest, decimal_mark);
     if (!parts) {
-        return refuse(parts.error());
+        return refusal(text, parts.error());
     }
     auto number = number_of(*parts);
     if (!number) {
-        return refuse(number.error());
+        return refusal(text, number.error());
     }
     quantity.number = *std::move(number);
     const std::string_view behind = trim_spaces(rest.substr(parts->length));
     if (goes_on(behind)) {
-        return refuse(fmt::format("{} follows the number", quoted(behind)));
+        return refusal(text, fmt::format("{} follows the number", quoted(behind)));
     }
     const auto unit = without_quotes(behind);
     if (!unit) {
-        return refuse("a quotation mark has no partner");
+        return refusal(text, "a quotation mark has no partner");
     }
     quantity.unit = std::string(*unit);
     return quantity;

@@ -5,6 +5,7 @@
 
 #include <algorithm>
 #include <array>
+#include <utility>
 
 namespace isohydric::units {
 
@@ -98,7 +99,8 @@ std::optional<std::string_view> look_up(const std::array<Spelling, Size>& table,
 }
 
 bool is_code(std::string_view text) {
-    return detail::parse_terms(text).has_value();
+    auto terms = detail::parse_terms(text);
+    return terms && detail::make_unit({}, *std::move(terms)).in_range();
 }
 
 /// Each part between slashes by itself: `mEq / l` -> `meq/l`.

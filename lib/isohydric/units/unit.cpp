@@ -19,6 +19,11 @@ namespace {
 constexpr int k_largest_term_exponent = 1000;
 constexpr int k_largest_scale_exponent = 150;
 constexpr double k_largest_mantissa = 1e150;
+constexpr std::string_view k_code_out_of_range = "(out of range)";
+/// The dimension of nothing else.
+constexpr int k_beyond = 1'000'000;
+constexpr detail::Scale k_scale_out_of_range{
+    .dimension = {k_beyond, k_beyond, k_beyond, k_beyond, k_beyond}, .in_range = false};
 
 double power_of(double base, int exponent) {
     double product = 1;
@@ -34,13 +39,13 @@ std::optional<detail::Scale> scale_of(const std::vector<detail::Term>& terms) {
     double divisor = 1;
     for (const detail::Term& term : terms) {
         const auto atom = detail::find_atom(term.atom);
-        if (!atom || std::abs(term.exponent) > k_largest_term_exponent) {
+        const int times = std::abs(term.exponent);
+        if (!atom || times > k_largest_term_exponent) {
             return std::nullopt;
         }
         scale.dimension = multiply(scale.dimension, power(atom->scale.dimension, term.exponent));
         scale.decimal_exponent += atom->scale.decimal_exponent * term.exponent;
-        (term.exponent > 0 ? scale.mantissa : divisor) *=
-            power_of(atom->scale.mantissa, std::abs(term.exponent));
+        (term.exponent > 0 ? scale.mantissa : divisor) *= power_of(atom->scale.mantissa, times);
         if (terms.size() == 1 && term.exponent == 1) {
             scale.zero_in_kelvins = atom->scale.zero_in_kelvins;
         }
@@ -68,6 +73,9 @@ Ratio ratio(const Unit& from, const Unit& to) {
 }
 
 Unit product(const Unit& left, const Unit& right, int right_exponent) {
+    if (!left.in_range() || !right.in_range()) {
+        return left.in_range() ? right : left;
+    }
     std::vector<detail::Term> terms = left.terms();
     std::ranges::transform(right.terms(), std::back_inserter(terms), [&](detail::Term term) {
         term.exponent *= right_exponent;
@@ -75,7 +83,12 @@ Unit product(const Unit& left, const Unit& right, int right_exponent) {
     });
     terms = detail::merge(std::move(terms));
     std::string code = detail::write_terms(terms);
-    return detail::make_unit(std::move(code), std::move(terms)).value();
+    return detail::make_unit(std::move(code), std::move(terms));
+}
+
+/// A bare number, or a unit of annotations only.
+bool is_one(const Unit& unit) {
+    return unit.in_range() && unit.terms().empty();
 }
 
 /// `; write "meq/L"` or `; did you mean "mmol/L"?`, or nothing.
@@ -117,12 +130,10 @@ double Unit::factor() const {
            detail::power_of_ten(-scale_.decimal_exponent);
 }
 
-diag::Result<Unit> detail::make_unit(std::string code, std::vector<Term> terms) {
+Unit detail::make_unit(std::string code, std::vector<Term> terms) {
     const auto scale = scale_of(terms);
-    if (!scale) {
-        return diag::unexpected("its powers are out of range");
-    }
-    return Unit(std::move(code), std::move(terms), *scale);
+    return scale ? Unit(std::move(code), std::move(terms), *scale)
+                 : Unit(std::string(k_code_out_of_range), {}, k_scale_out_of_range);
 }
 
 diag::Result<Unit> parse_unit(std::string_view ucum_code) {
@@ -135,18 +146,18 @@ diag::Result<Unit> parse_unit(std::string_view ucum_code) {
         return refuse(terms.error());
     }
     auto unit = detail::make_unit(std::string(ucum_code), *std::move(terms));
-    if (!unit) {
-        return refuse(unit.error());
+    if (!unit.in_range()) {
+        return refuse("its powers are out of range");
     }
     return unit;
 }
 
 Unit one() {
-    return detail::make_unit("1", {}).value();
+    return detail::make_unit("1", {});
 }
 
 bool commensurable(const Unit& left, const Unit& right) {
-    return left.dimension() == right.dimension();
+    return left.in_range() && right.in_range() && left.dimension() == right.dimension();
 }
 
 bool operator==(const Unit& left, const Unit& right) {
@@ -171,19 +182,20 @@ double factor_between(const Unit& from, const Unit& to) {
 }
 
 Unit operator*(const Unit& left, const Unit& right) {
-    if (left.terms().empty()) {
+    if (is_one(left)) {
         return right;
     }
-    return right.terms().empty() ? left : product(left, right, 1);
+    return is_one(right) ? left : product(left, right, 1);
 }
 
 Unit operator/(const Unit& left, const Unit& right) {
-    return right.terms().empty() ? left : product(left, right, -1);
+    return is_one(right) ? left : product(left, right, -1);
 }
 
 Unit power(const Unit& base, int exponent) {
-    ISOHYDRIC_ASSERT(std::abs(exponent) <= k_largest_exponent);
-    return product(one(), base, exponent);
+    constexpr int k_surely_out_of_range = k_largest_term_exponent + 1;
+    return product(
+        one(), base, std::clamp(exponent, -k_surely_out_of_range, k_surely_out_of_range));
 }
 
 }  // namespace isohydric::units

@@ -25,7 +25,7 @@ struct Dimension {
 [[nodiscard]] Dimension divide(const Dimension& left, const Dimension& right);
 [[nodiscard]] Dimension power(const Dimension& base, int exponent);
 
-/// The greatest exponent, up or down, of an atom in a code (`m3`) and of power().
+/// The greatest exponent, up or down, of an atom in a code (`m3`).
 inline constexpr int k_largest_exponent = 9;
 /// The same for `10*`.
 inline constexpr int k_largest_decimal_exponent = 30;
@@ -47,11 +47,12 @@ struct Scale {
     Dimension dimension;
     double mantissa = 1;
     int decimal_exponent{};
-    double
-        zero_in_kelvins{};  ///< where the unit's zero lies: 273.15 for Cel, 0 for a unit without offset
+    double zero_in_kelvins{};  ///< of the unit's zero: 273.15 for Cel; 0 without offset
+    bool in_range = true;
 };
 
-[[nodiscard]] diag::Result<Unit> make_unit(std::string code, std::vector<Term> terms);
+/// Never fails: what no double can hold gives a unit that is not in range.
+[[nodiscard]] Unit make_unit(std::string code, std::vector<Term> terms);
 
 }  // namespace detail
 
@@ -66,6 +67,10 @@ class Unit {
     /// How many metres, grams, seconds, kelvins and moles, multiplied out, one of this unit is.
     [[nodiscard]] double factor() const;
 
+    /// False for a product or power beyond all reason (`m` to the 10000th). It is commensurable with nothing, not even
+    /// itself, and whatever is made from it is not in range either.
+    [[nodiscard]] bool in_range() const { return scale_.in_range; }
+
     /// Whether the unit's zero is not the quantity's (`Cel`, `[degF]`).
     [[nodiscard]] bool has_offset() const { return scale_.zero_in_kelvins != 0; }
 
@@ -74,7 +79,7 @@ class Unit {
     [[nodiscard]] const detail::Scale& scale() const { return scale_; }
 
   private:
-    friend diag::Result<Unit> detail::make_unit(std::string code, std::vector<detail::Term> terms);
+    friend Unit detail::make_unit(std::string code, std::vector<detail::Term> terms);
 
     Unit(std::string code, std::vector<detail::Term> terms, const detail::Scale& scale);
 
@@ -113,7 +118,6 @@ class Unit {
 /// and `[degF]` count as degrees in a product, without their zero points.
 [[nodiscard]] Unit operator*(const Unit& left, const Unit& right);
 [[nodiscard]] Unit operator/(const Unit& left, const Unit& right);
-/// Requires an exponent within +/- k_largest_exponent.
 [[nodiscard]] Unit power(const Unit& base, int exponent);
 
 }  // namespace isohydric::units
