@@ -83,7 +83,7 @@ TEST_CASE("bibliography: keys are unique, and lines are short") {
     sources.insert(
         1, R"({"id": "albert1967", "type": "article-journal", "title": "Quantitative displacement",
       "author": [{"family": "Albert", "given": "Morris S."}, {"family": "Dell", "given": "Ralph B"},
-                 {"family": "Winters", "given": "R.-W."}],
+                 {"family": "Winters", "given": "RW"}],
       "container-title": "Ann Intern Med", "issued": {"date-parts": [[1967, 2]]}, "volume": 66, "page": "312-22"},
      {"id": "agency2020", "type": "webpage", "title": "A guide", "author": [{"literal": "An agency"}],
       "publisher": "An agency", "issued": {"date-parts": [["2020"]]}},
@@ -101,7 +101,9 @@ TEST_CASE("bibliography: keys are unique, and lines are short") {
 
     sources.insert(1, R"({"id": "known2001", "type": "book", "title": "t"},)");
     CHECK(test::read(tree).has("rule-source-twice"));
-    sources = R"([@@{"id": "x", "type": "book"}])";
+    sources = R"([{"id": @@"x", "type": "book", "DOI": "10.1/x"}])";
+    test::check_complaint(tree, "rule-source-empty");
+    sources = R"([@@{"id": "x", "title": "t"}])";
     test::check_complaint(tree, "json-missing-key");
     sources = "@@{}";
     test::check_complaint(tree, "json-wrong-kind");

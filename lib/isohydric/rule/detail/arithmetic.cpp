@@ -17,7 +17,6 @@ namespace isohydric::rule {
 namespace {
 
 constexpr std::size_t k_brief_limit = 40;
-constexpr double k_factor_limit = 1e100;
 
 ExpressionPtr
 number_node(const Syntax& syntax, const units::Unit& unit, std::vector<ExpressionPtr> children) {
@@ -57,6 +56,18 @@ std::optional<int> integer_literal(const Expression& value) {
     return whole ? std::optional(integer) : std::nullopt;
 }
 
+std::string bare_number_message(const Expression& bare, const Expression& other) {
+    const std::string& code = other.unit.code();
+    std::string message = fmt::format(
+        "{0} has no unit, but {1} is in {2}; write {0} '{2}'", bare.text, brief(other), code);
+    if (units::commensurable(bare.unit, other.unit)) {
+        message += fmt::format(", or {:.15g} '{}' if it is a fraction",
+                               units::convert(bare.number, bare.unit, other.unit),
+                               code);
+    }
+    return message;
+}
+
 /// The unit, in base units, whose square has the given dimension; none if that has an odd exponent.
 std::optional<units::Unit> root_unit(const units::Dimension& square) {
     const std::array parts{std::pair{"m", square.length},
@@ -79,7 +90,7 @@ std::optional<units::Unit> root_unit(const units::Dimension& square) {
 }  // namespace
 
 std::string brief(const Expression& expression) {
-    std::string text = plain_text(expression);
+    std::string text = plain_text(expression, [](const Expression& name) { return name.text; });
     return text.size() <= k_brief_limit ? text : "this expression";
 }
 
@@ -156,7 +167,7 @@ Arithmetic::product(const Syntax& syntax, const ExpressionPtr& left, const Expre
     const units::Unit unit =
         syntax.kind == NodeKind::multiply ? left->unit * right->unit : left->unit / right->unit;
     ExpressionPtr node = number_node(syntax, unit, {left, right});
-    return within_limits(*node) ? node : nullptr;
+    return in_range(*node) ? node : nullptr;
 }
 
 ExpressionPtr Arithmetic::same_unit(const Syntax& syntax, const ExpressionPtr& value) {
@@ -197,7 +208,7 @@ Arithmetic::power(const Syntax& syntax, const ExpressionPtr& base, const Express
         return nullptr;
     }
     ExpressionPtr node = number_node(syntax, units::power(base->unit, *integer), {base, exponent});
-    return within_limits(*node) ? node : nullptr;
+    return in_range(*node) ? node : nullptr;
 }
 
 ExpressionPtr Arithmetic::square_root(const Syntax& syntax, const ExpressionPtr& value) {
@@ -243,12 +254,7 @@ bool Arithmetic::agree(const Expression& left, const Expression& right, const di
     if (left_bare || is_bare_literal(right)) {
         const Expression& bare = left_bare ? left : right;
         const Expression& other = left_bare ? right : left;
-        report_.error("expression-bare-number",
-                      bare.place,
-                      fmt::format("{0} has no unit, but {1} is in {2}; write {0} '{2}'",
-                                  bare.text,
-                                  brief(other),
-                                  other.unit.code()));
+        report_.error("expression-bare-number", bare.place, bare_number_message(bare, other));
         return false;
     }
     if (!units::commensurable(left.unit, right.unit)) {
@@ -307,22 +313,13 @@ bool Arithmetic::dimensionless(const Expression& value, const std::string& funct
     return false;
 }
 
-bool Arithmetic::within_limits(const Expression& node) {
-    const units::Dimension& dimension = node.unit.dimension();
-    bool small = node.unit.factor() < k_factor_limit && node.unit.factor() > 1 / k_factor_limit;
-    for (const int exponent : {dimension.length,
-                               dimension.mass,
-                               dimension.time,
-                               dimension.temperature,
-                               dimension.amount}) {
-        small = small && std::abs(exponent) <= 2 * units::k_largest_exponent;
-    }
-    if (!small) {
+bool Arithmetic::in_range(const Expression& node) {
+    if (!node.unit.in_range()) {
         report_.error("expression-dimension",
                       node.place,
                       "the unit of this product is beyond what is computed with");
     }
-    return small;
+    return node.unit.in_range();
 }
 
 }  // namespace isohydric::rule

@@ -50,7 +50,7 @@ class Arithmetic {
     bool agree(const Expression& left, const Expression& right, const diag::Place& place);
     bool without_zero_point(const Expression& value, const diag::Place& place);
     bool dimensionless(const Expression& value, const std::string& function);
-    bool within_limits(const Expression& node);
+    bool in_range(const Expression& node);
 
     diag::Report& report_;
 };

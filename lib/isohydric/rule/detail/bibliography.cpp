@@ -19,18 +19,24 @@ std::string text_of(const diag::Json& item, std::string_view name) {
     return printable ? std::string(member->text()) : std::string();
 }
 
-// "Robert W." becomes "RW". Letters beyond ASCII are kept whole.
+constexpr bool is_capital(char c) {
+    return c >= 'A' && c <= 'Z';
+}
+
+// "Robert W." becomes "RW", and so does "RW". Letters beyond ASCII are kept whole.
 std::string initials(std::string_view given) {
     std::string letters;
-    bool at_start = true;
+    bool word_begins = true;
+    bool kept = false;
     for (std::size_t i = 0; i < given.size();) {
         const std::size_t length =
             std::max<std::size_t>(1, diag::utf8_sequence_length(given.substr(i)));
         const bool gap = given[i] == ' ' || given[i] == '-' || given[i] == '.';
-        if (at_start && !gap) {
+        kept = !gap && (word_begins || (kept && is_capital(given[i])));
+        if (kept) {
             letters += given.substr(i, length);
         }
-        at_start = gap;
+        word_begins = gap;
         i += length;
     }
     return letters;
@@ -129,10 +135,17 @@ void read_bibliography(const diag::Json& file, std::vector<CslItem>& items, diag
         // CSL-JSON has some hundred members; those that are not printed are not looked at.
         diag::ObjectReader reader(json, report, "bibliography item");
         const diag::Json* id = reader.required("id", diag::Kind::string);
-        reader.required_text("title");
         reader.required_text("type");
         if (id == nullptr) {
             continue;
+        }
+        const std::string citation = citation_line(json);
+        if (citation.empty()) {
+            report.error("rule-source-empty",
+                         id->place(),
+                         fmt::format("nothing is told of \"{}\"; give its author, title, "
+                                     "container-title or publisher",
+                                     id->text()));
         }
         const auto same = [&](const CslItem& other) {
             return other.item.id == id->text();
@@ -145,11 +158,10 @@ void read_bibliography(const diag::Json& file, std::vector<CslItem>& items, diag
                 .notes.push_back({"the first is here", first->item.place});
             continue;
         }
-        items.push_back({.item = {.id = std::string(id->text()),
-                                  .citation = citation_line(json),
-                                  .place = id->place()},
-                         .json = &json,
-                         .cited_elsewhere = text_of(json, "keyword") == "code"});
+        items.push_back(
+            {.item = {.id = std::string(id->text()), .citation = citation, .place = id->place()},
+             .json = &json,
+             .cited_elsewhere = text_of(json, "keyword") == "code"});
     }
 }
 

@@ -160,7 +160,13 @@ void compare_members(const Convention& other,
         if (match == found.end()) {
             complain(other.head.place,
                      fmt::format("\"{}\" does not define \"{}\"", other.head.id, id));
-        } else if (match->second->kind != entry->kind || !same_unit(*match->second, *entry)) {
+        } else if (match->second->kind != entry->kind) {
+            complain(match->second->json->find("id")->place(),
+                     fmt::format("\"{}\" is a {} here and a {} in the chosen alternative",
+                                 id,
+                                 describe(match->second->kind),
+                                 describe(entry->kind)));
+        } else if (!same_unit(*match->second, *entry)) {
             complain(match->second->json->find("id")->place(),
                      fmt::format("\"{}\" is in {} here and in {} in the chosen alternative",
                                  id,

@@ -12,8 +12,17 @@
 namespace isohydric::rule {
 namespace {
 
-/// Number forms of expressions that are known not to be empty.
-using Facts = std::set<std::string>;
+/// What is known not to be empty.
+struct Facts {
+    std::set<std::string> present;               // number forms of expressions
+    const NeverEmptyName* never_empty = nullptr;  // of names, if anybody knows
+
+    [[nodiscard]] bool hold(const Expression& expression) const {
+        return expression.never_empty || present.contains(number_form(expression)) ||
+               (never_empty != nullptr && expression.kind == NodeKind::name &&
+                (*never_empty)(expression.symbol));
+    }
+};
 
 /// Whether the node's value is there whenever those of all its children are: not for a division by zero, a function
 /// outside its domain, a power out of range.
@@ -36,7 +45,7 @@ bool is_strict(NodeKind kind) {
 
 /// Adds what follows from `expression` not being empty.
 void add_present(const Expression& expression, Facts& facts) {
-    facts.insert(number_form(expression));
+    facts.present.insert(number_form(expression));
     if (is_strict(expression.kind)) {
         for (const ExpressionPtr& child : expression.children) {
             add_present(*child, facts);
@@ -82,7 +91,7 @@ bool choice_can_be_empty(const Expression& choice, const Facts& facts) {
 }
 
 bool can_be_empty(const Expression& expression, const Facts& facts) {
-    if (expression.never_empty || facts.contains(number_form(expression))) {
+    if (facts.hold(expression)) {
         return false;
     }
     if (is_lazy_logic(expression.kind)) {
@@ -121,8 +130,12 @@ void check_choices(const Expression& expression, const Facts& facts, diag::Repor
 
 }  // namespace
 
+bool can_be_empty(const Expression& expression, const NeverEmptyName& never_empty) {
+    return can_be_empty(expression, Facts{.present = {}, .never_empty = &never_empty});
+}
+
 void check_choices(const Expression& expression, diag::Report& report) {
-    check_choices(expression, {}, report);
+    check_choices(expression, Facts{}, report);
 }
 
 }  // namespace isohydric::rule

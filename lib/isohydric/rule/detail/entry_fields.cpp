@@ -111,9 +111,18 @@ ExpressionPtr read_formula(diag::ObjectReader& reader,
                            : read_expression(*text, context.names, wanted, context.report);
 }
 
+ExpressionPtr read_optional_formula(diag::ObjectReader& reader,
+                                    std::string_view name,
+                                    const Wanted& wanted,
+                                    const EntryContext& context) {
+    const diag::Json* text = reader.optional(name, diag::Kind::string);
+    return text == nullptr ? nullptr
+                           : read_expression(*text, context.names, wanted, context.report);
+}
+
 ExpressionPtr
 read_truth(diag::ObjectReader& reader, std::string_view name, const EntryContext& context) {
-    return read_formula(reader, name, {.type = Type::truth, .unit = std::nullopt}, context);
+    return read_formula(reader, name, k_wanted_truth, context);
 }
 
 std::string

@@ -15,6 +15,9 @@
 
 namespace isohydric::rule::detail {
 
+/// What a condition yields.
+inline const Wanted k_wanted_truth{.type = Type::truth, .unit = std::nullopt};
+
 /// What every reader of an entry needs: the rule set as declared, its names, and where to complain.
 struct EntryContext {
     const RuleSet& rules;
@@ -33,6 +36,11 @@ struct EntryContext {
                                          std::string_view name,
                                          const Wanted& wanted,
                                          const EntryContext& context);
+/// The same for an optional member; null also where it is missing.
+[[nodiscard]] ExpressionPtr read_optional_formula(diag::ObjectReader& reader,
+                                                  std::string_view name,
+                                                  const Wanted& wanted,
+                                                  const EntryContext& context);
 [[nodiscard]] ExpressionPtr
 read_truth(diag::ObjectReader& reader, std::string_view name, const EntryContext& context);
 

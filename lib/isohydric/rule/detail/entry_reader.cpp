@@ -179,9 +179,7 @@ Disorder read_disorder(const diag::Json& json, const EntryContext& context) {
                                  "main disorder and stand in one that is not");
         }
     }
-    if (reader.any("judgedWhen") != nullptr) {
-        disorder.judged_when = read_truth(reader, "judgedWhen", context);
-    }
+    disorder.judged_when = read_optional_formula(reader, "judgedWhen", k_wanted_truth, context);
     for (const Written& approach : read_list(reader, "approaches", context.report)) {
         disorder.approaches.push_back(checked_approach(approach, context.report));
     }

@@ -31,13 +31,8 @@ std::optional<Compensation> read_compensation(diag::ObjectReader& entry,
             wanted.unit = context.rules.quantities[*index].unit;
         }
     }
-    const auto side = [&](const char* name) {
-        const diag::Json* text = reader.optional(name, diag::Kind::string);
-        return text == nullptr ? nullptr
-                               : read_expression(*text, context.names, wanted, context.report);
-    };
-    compensation.low = side("low");
-    compensation.high = side("high");
+    compensation.low = read_optional_formula(reader, "low", wanted, context);
+    compensation.high = read_optional_formula(reader, "high", wanted, context);
     compensation.from = reader.required_text("from").value_or("");
     if (json->find("low") == nullptr && json->find("high") == nullptr) {
         context.report.error("rule-interval-empty",

@@ -65,11 +65,11 @@ void check_limits(const Interval& interval, const EntryContext& context) {
                              fmt::format("\"{}\" has no limit; give \"low\", \"mid\" or \"high\"",
                                          interval.head.id));
     }
-    const auto out_of_order = [](std::optional<double> a, std::optional<double> b) {
-        return a && b && *a >= *b;
+    const auto falls = [](std::optional<double> a, std::optional<double> b) {
+        return a && b && *a > *b;
     };
-    if (out_of_order(interval.low, interval.mid) || out_of_order(interval.mid, interval.high) ||
-        out_of_order(interval.low, interval.high)) {
+    const bool no_width = interval.low && interval.high && *interval.low >= *interval.high;
+    if (falls(interval.low, interval.mid) || falls(interval.mid, interval.high) || no_width) {
         context.report.error("rule-interval-order",
                              interval.head.place,
                              fmt::format("the limits of \"{}\" are out of order; low, mid and high "
