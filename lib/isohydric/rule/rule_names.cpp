@@ -1,5 +1,7 @@
 #include "isohydric/rule/rule_names.hpp"
 
+#include "isohydric/rule/detail/emptiness.hpp"
+
 #include <algorithm>
 #include <array>
 
@@ -56,6 +58,18 @@ std::optional<NamedSymbol> RuleNames::find(std::string_view dotted) const {
     return find(std::span<const std::string>(split(dotted)));
 }
 
+bool RuleNames::never_empty(std::uint32_t condition, std::set<std::uint32_t>& open) const {
+    const ExpressionPtr& when = rules_.conditions[condition].when;
+    if (!when || !open.insert(condition).second) {
+        return false;
+    }
+    const bool never = !can_be_empty(*when, [&](const Symbol& symbol) {
+        return symbol.kind == SymbolKind::condition && never_empty(symbol.index, open);
+    });
+    open.erase(condition);
+    return never;
+}
+
 std::optional<NamedSymbol> RuleNames::find_single(std::string_view name) const {
     for (const panel::AnalyteInfo& info : rules_.catalogue->analytes) {
         if (info.expression_name == name) {
@@ -72,7 +86,10 @@ std::optional<NamedSymbol> RuleNames::find_single(std::string_view name) const {
         return number(SymbolKind::quantity, entry->index, rules_.quantities[entry->index].unit);
     }
     if (entry->kind == EntryKind::condition) {
-        return truth(SymbolKind::condition, entry->index);
+        NamedSymbol condition = truth(SymbolKind::condition, entry->index);
+        std::set<std::uint32_t> open;
+        condition.never_empty = never_empty(entry->index, open);
+        return condition;
     }
     if (entry->kind == EntryKind::finding) {
         return truth(SymbolKind::finding, entry->index);

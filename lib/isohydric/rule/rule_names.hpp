@@ -5,6 +5,9 @@
 #include "isohydric/rule/names.hpp"
 #include "isohydric/rule/rule_set.hpp"
 
+#include <cstdint>
+#include <set>
+
 namespace isohydric::rule {
 
 /// Analytes, roundings, quantities, conditions, findings, limits and the context. The rule set must outlive it.
@@ -23,6 +26,9 @@ class RuleNames : public NameTable {
     [[nodiscard]] std::optional<NamedSymbol> find_limit(std::string_view name,
                                                         std::string_view part) const;
     [[nodiscard]] std::optional<NamedSymbol> find_rounding(std::string_view analyte_id) const;
+
+    /// Whether a condition that has been read can never be empty; `open` holds those being asked about.
+    [[nodiscard]] bool never_empty(std::uint32_t condition, std::set<std::uint32_t>& open) const;
 
     const RuleSet& rules_;
 };

@@ -110,8 +110,13 @@ class SetReader {
     void read_entries() {
         const RuleNames names(*rules_);
         const detail::EntryContext context{*rules_, names, report_};
-        for (const detail::Declared& declared : declared_) {
-            detail::read_entry(declared, *rules_, context);
+        // Conditions first: whether one can be empty decides whether `iif` may ask it.
+        for (const bool conditions : {true, false}) {
+            for (const detail::Declared& declared : declared_) {
+                if ((declared.kind == EntryKind::condition) == conditions) {
+                    detail::read_entry(declared, *rules_, context);
+                }
+            }
         }
     }
 
