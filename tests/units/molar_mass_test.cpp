@@ -28,8 +28,7 @@ bool within(double value, double expected, double relative) {
 
 }  // namespace
 
-TEST_CASE("molar mass: of formulas, as a national table of units prints them "
-          "[@nlm-flowsheet-units, column R]") {
+TEST_CASE("molar mass: formulas give printed values [@nlm-flowsheet-units, column R]") {
     CHECK(std::abs(units::k_glucose_g_mol - 180.156) < 0.0005);
     CHECK(std::abs(units::k_ethanol_g_mol - 46.07) < 0.005);
     CHECK(std::abs(units::k_calcium_g_mol - 40.078) < 0.0005);
@@ -39,8 +38,7 @@ TEST_CASE("molar mass: of formulas, as a national table of units prints them "
     CHECK(within(units::k_creatinine_g_mol, 113.1179, 2e-5));  // from other atomic weights
 }
 
-TEST_CASE("molar mass: conversions in use agree within 0.3 % [@regenstrief-unit-equations-2017, "
-          "equations]") {
+TEST_CASE("molar mass: factors within 0.3 % [@regenstrief-unit-equations-2017, equations]") {
     CHECK(within(millimoles_per_litre("calcium"), 1 / 4.008, 0.003));
     CHECK(within(millimoles_per_litre("creatinine"), 0.1 / 1.131, 0.003));
     CHECK(within(millimoles_per_litre("glucose"), 1 / 18.02, 0.003));

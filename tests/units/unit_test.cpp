@@ -63,8 +63,7 @@ TEST_CASE("unit: 40 mmHg is 5.33 kPa and a kPa is 7.50062 mmHg, common practice"
     CHECK(prints_as(ratio("kPa", "mm[Hg]"), 7.50062, 0.000005));
 }
 
-TEST_CASE("unit: decimal ratios are exact, by definition of the prefixes [@ucum, section "
-          "4.1]") {
+TEST_CASE("unit: ratios by prefixes are exact [@ucum, section 4.1]") {
     CHECK(ratio("g/dL", "g/L") == 10);
     CHECK(ratio("mmol/L", "umol/L") == 1000);
     CHECK(ratio("umol/L", "mmol/L") == 0.001);
@@ -120,8 +119,7 @@ TEST_CASE("unit: between equal units a value comes back bit for bit") {
     CHECK(std::isnan(converted(std::numeric_limits<double>::quiet_NaN(), "kPa", "mm[Hg]")));
 }
 
-TEST_CASE("unit: mol, eq and osm are one dimension, per volume and per mass are two [@ucum, "
-          "section 4.4]") {
+TEST_CASE("unit: mol, eq and osm are one dimension [@ucum, section 4.4]") {
     CHECK(units::commensurable(unit("mmol/L"), unit("meq/L")));
     CHECK(units::commensurable(unit("mosm/kg"), unit("mmol/kg")));
     CHECK_FALSE(units::commensurable(unit("mosm/kg"), unit("mosm/L")));
