@@ -89,7 +89,7 @@ interpret::Interpretation interpret_case(const WorkedCase& worked, bool with_ons
         reader.set_context("onset", worked.onset, {});
     }
     const std::optional<panel::Panel> panel = reader.finish();
-    REQUIRE_MESSAGE(panel, worked.id + ": " + diag::render(report));
+    REQUIRE_MESSAGE(panel, worked.id << ": " << diag::render(report));
     interpret::Interpreter interpreter(harness::shipped_program());
     return interpreter.interpret(*panel);
 }
@@ -119,10 +119,10 @@ Score score(bool with_onset) {
         result.first += first ? 1U : 0U;
         result.among += among ? 1U : 0U;
         if (!first) {
-            MESSAGE(worked.id << (among ? " among: " : " MISSED: ") << worked.disorders << " in [" << listed(sets) << "]");
+            MESSAGE(worked.id << std::string(among ? " among: " : " MISSED: ") << worked.disorders << " in [" << listed(sets) << "]");
         }
     }
-    MESSAGE((with_onset ? "onset as stated: " : "onset withheld: ") << result.cases << " cases, first " << result.first << ", among " << result.among);
+    MESSAGE(std::string(with_onset ? "onset as stated: " : "onset withheld: ") << result.cases << " cases, first " << result.first << ", among " << result.among);
     return result;
 }
 
@@ -206,7 +206,9 @@ TEST_CASE("published cases: chemistry alone gives metabolic acidosis of the high
         if (worked.id == "A19" || worked.id == "A31") {
             const interpret::Interpretation result = interpret_case(worked, false);
             REQUIRE(!result.explanations.empty());
-            CHECK(result.explanations.front().disorders == std::vector<std::string>{"metabolic-acidosis", "high-anion-gap-acidosis"});
+            const std::vector<std::string>& disorders = result.explanations.front().disorders;
+            CHECK(harness::explanation_sets(result).front() == "metabolic-acidosis");
+            CHECK(std::count(disorders.begin(), disorders.end(), "high-anion-gap-acidosis") == 1);
             CHECK(harness::disorder_of(result, "respiratory-acidosis").bicarbonate == interpret::Verdict::unknown);
         }
     }
