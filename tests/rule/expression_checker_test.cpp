@@ -1,4 +1,5 @@
 // Names, types, units and codes: what the checker accepts, what it makes of it, and where it points when it refuses.
+#include "isohydric/panel/context.hpp"
 #include "isohydric/rule/walk.hpp"
 
 #include <cmath>
@@ -70,7 +71,6 @@ TEST_CASE("checker: a literal is converted to the unit of the name beside it") {
     CHECK(literals("albumin < 3.5 'g/dL'", truth()) == std::vector{35.0});
     CHECK(literals("Na > 0.14 'mol/L'", truth()) == std::vector{140.0});
     CHECK(literals("Na > 140 'meq/L'", truth()) == std::vector{140.0});
-    CHECK(literals("sO2 < 0.5 '1'", truth()) == std::vector{50.0});
 }
 
 TEST_CASE("checker: the result is converted to the unit of its owner") {
@@ -128,6 +128,8 @@ TEST_CASE("checker: a bare number beside a quantity is refused at its place") {
     CHECK(faults("HCO3 + 24", number()) == "1:9-11 expression-bare-number");
     CHECK(faults("24", number("mmol/L")) == "1:2-4 expression-bare-number");
     CHECK(faults("sO2 < 0.9", truth()) == "1:8-11 expression-bare-number");
+    CHECK(message("sO2 < 0.9", truth()) ==
+          "0.9 has no unit, but sO2 is in %; write 0.9 '%', or 90 '%' if it is a fraction");
     CHECK(faults("pH < 7.35", truth()).empty());
     CHECK(faults("2 * HCO3 > 24 'mmol/L'", truth()).empty());
 }
@@ -136,7 +138,7 @@ TEST_CASE("checker: dimensions that do not agree are refused at the operator") {
     CHECK(faults("pCO2 < HCO3", truth()) == "1:7-8 expression-dimension");
     CHECK(message("pCO2 < HCO3", truth()) ==
           "pCO2 is in mm[Hg], but HCO3 is in mmol/L; no factor brings one to the other");
-    CHECK(faults("Na - Cl + pCO2", number()) == "1:11-12 expression-dimension");
+    CHECK(faults("Na - Cl + pCO2", number()) == "1:10-11 expression-dimension");
     CHECK(faults("albumin < 40 'mmol/L'", truth()) == "1:10-11 expression-dimension");
     CHECK(faults("pH < Na", truth()) == "1:5-6 expression-dimension");
     CHECK(faults("pCO2", number("mmol/L")) == "1:2-6 expression-dimension");
@@ -199,7 +201,7 @@ TEST_CASE("checker: codes are compared for equality with a text of their enumera
                            "are arterial, "));
     CHECK(faults("context.onset < 'chronic'", truth()) ==
           "1:2-15 expression-type; 1:18-27 expression-code");
-    CHECK(faults("context.onset = context.specimen", truth()) == "1:2-15 expression-type");
+    CHECK(faults("context.onset = context.specimen", truth()) == "1:18-34 expression-code");
     CHECK(faults("context.onset", truth()) == "1:2-15 expression-type");
     CHECK(faults("pH = 'low'", truth()) == "1:7-12 expression-code");
     CHECK(faults("'low' = 'low'", truth()).starts_with("1:2-7 expression-code"));
@@ -226,16 +228,25 @@ TEST_CASE("checker: functions without a unit, and those that change the unit") {
     CHECK(form("pH.sqrt()", number("1")) == "v_pH.sqrt()");
 }
 
-TEST_CASE("checker: the root of a product of like units is that unit") {
-    // sqrt(x mmol2/L2) is sqrt(x) mmol/L, whatever units lie between: outside and inside factor cancel.
-    const std::vector<double> factors = literals("(Na * Cl).sqrt()", number("mmol/L"));
+TEST_CASE("checker: the root of a product is brought to the unit wanted, inside and outside") {
+    // sqrt(x mmHg kPa) is sqrt(x) sqrt(0.133...) kPa.
+    const std::vector<double> factors = literals("(pCO2 * pCO2kPa).sqrt()", number("kPa"));
     REQUIRE(factors.size() == 2);
-    CHECK(factors[1] * std::sqrt(factors[0]) == doctest::Approx(1.0).epsilon(1e-14));
+    CHECK(factors[1] * std::sqrt(factors[0]) ==
+          doctest::Approx(std::sqrt(1 / k_mmHg_per_kPa)).epsilon(1e-14));
+    CHECK(form("(Na * Cl).sqrt()", number("mmol/L")) == "(v_Na * v_Cl).sqrt()");
 }
 
 TEST_CASE("checker: units beyond any use are refused, not computed with") {
-    CHECK(faults("Na.power(9).power(9)", number()) == "1:2-22 expression-dimension");
-    CHECK(faults("Na.power(9) * Na.power(9) * Na", number()) == "1:2-32 expression-dimension");
+    CHECK(faults("Na.power(9)", number()).empty());
+    CHECK(faults("Na.power(9).power(9).power(9)", number()).empty());
+    CHECK(faults("Na.power(9).power(9).power(9).power(9)", number()) ==
+          "1:2-40 expression-dimension");
+    CHECK(
+        faults("Na > 1 'Ymol/L' * 1 '10*30' * 1 '10*30' * 1 '10*30' * 1 '10*30'", truth()).empty());
+    CHECK(faults("Na > 1 '10*30' * 1 '10*30' * 1 '10*30' * 1 '10*30' * 1 '10*30' * 1 'Ymol/L'",
+                 truth())
+              .ends_with("expression-dimension"));
 }
 
 TEST_CASE("checker: temperatures are compared in one unit, and differ in kelvins") {

@@ -1,6 +1,5 @@
 // Conditions of iif must not be empty: what the checker accepts is compared with evaluation in three-valued logic over
 // every combination of missing and present names.
-#include <array>
 #include <set>
 
 #include "rule/expression_fixture.hpp"
@@ -22,11 +21,16 @@ bool accepted(const std::string& condition) {
 
 enum class Truth { no, yes, empty };
 
-/// Whether a condition is empty when the given names are missing; present numbers are 1. FHIRPath's tables
-/// [@hl7-fhirpath, Boolean logic].
-Truth evaluate(const Expression& node, const std::set<std::string>& missing) {
+/// One way in which things may stand: the names that are missing, what is false, and whether comparisons hold.
+struct World {
+    std::set<std::string> missing, untrue;
+    bool comparisons_hold{};
+};
+
+/// The truth of a condition by FHIRPath's tables [@hl7-fhirpath, Boolean logic]; a number that is there counts as yes.
+Truth evaluate(const Expression& node, const World& world) {
     const auto child = [&](std::size_t i) {
-        return evaluate(*node.children[i], missing);
+        return evaluate(*node.children[i], world);
     };
     const auto truth_of = [](bool value) {
         return value ? Truth::yes : Truth::no;
@@ -40,47 +44,56 @@ Truth evaluate(const Expression& node, const std::set<std::string>& missing) {
         }
         return left == Truth::yes && right == Truth::yes ? Truth::yes : Truth::empty;
     };
-    switch (node.kind) {
-    case NodeKind::name:
-        return missing.contains(node.text) ? Truth::empty : Truth::yes;
-    case NodeKind::number_literal:
-        return Truth::yes;
-    case NodeKind::logical_and:
+    if (node.kind == NodeKind::name) {
+        return world.missing.contains(node.text) ? Truth::empty
+                                                 : truth_of(!world.untrue.contains(node.text));
+    }
+    if (node.kind == NodeKind::logical_and) {
         return both(child(0), child(1));
-    case NodeKind::logical_or:
+    }
+    if (node.kind == NodeKind::logical_or) {
         return negated(both(negated(child(0)), negated(child(1))));
-    case NodeKind::logical_implies:
+    }
+    if (node.kind == NodeKind::logical_implies) {
         return negated(both(child(0), negated(child(1))));
-    case NodeKind::call_not:
+    }
+    if (node.kind == NodeKind::call_not) {
         return negated(child(0));
-    case NodeKind::call_exists:
-        return truth_of(child(0) != Truth::empty);
-    case NodeKind::call_empty:
-        return truth_of(child(0) == Truth::empty);
-    default: {
-        bool empty = false;
-        for (std::size_t i = 0; i < node.children.size(); ++i) {
-            empty = empty || child(i) == Truth::empty;
-        }
-        return empty ? Truth::empty : Truth::yes;
     }
+    if (node.kind == NodeKind::call_exists || node.kind == NodeKind::call_empty) {
+        return truth_of((child(0) == Truth::empty) == (node.kind == NodeKind::call_empty));
     }
+    bool empty = false;
+    for (std::size_t i = 0; i < node.children.size(); ++i) {
+        empty = empty || child(i) == Truth::empty;
+    }
+    const bool compares = node.type == Type::truth;
+    return empty ? Truth::empty : truth_of(!compares || world.comparisons_hold);
 }
 
-/// Whether any combination of missing names leaves the condition empty.
+/// Whether the condition is empty in any world.
 bool ever_empty(const std::string& condition) {
     Text text(condition);
     const ExpressionPtr read = text.read(truth());
     REQUIRE_MESSAGE(read != nullptr, ids(text.report));
-    const std::array<std::string, 3> names{"Na", "Cl", "lowGas"};
-    for (unsigned mask = 0; mask < 8; ++mask) {
-        std::set<std::string> missing;
-        for (unsigned i = 0; i < 3; ++i) {
-            if ((mask >> i & 1U) != 0) {
-                missing.insert(names[i]);
+    for (unsigned bits = 0; bits < 64; ++bits) {
+        const auto bit = [bits](unsigned i) {
+            return (bits >> i & 1U) != 0;
+        };
+        World world;
+        unsigned next = 0;
+        for (const std::string name : {"Na", "Cl", "lowGas"}) {
+            if (bit(next++)) {
+                world.missing.insert(name);
             }
         }
-        if (evaluate(*read, missing) == Truth::empty) {
+        for (const std::string name : {"lowGas", "context.near"}) {
+            if (bit(next++)) {
+                world.untrue.insert(name);
+            }
+        }
+        world.comparisons_hold = bit(next);
+        if (evaluate(*read, world) == Truth::empty) {
             return true;
         }
     }

@@ -13,6 +13,7 @@
 #include <map>
 #include <optional>
 #include <string>
+#include <string_view>
 #include <vector>
 
 namespace isohydric::rule::testing {
@@ -82,9 +83,13 @@ class SmallTable : public NameTable {
 class Text {
   public:
     explicit Text(const std::string& expression) {
+        constexpr std::string_view k_special = "\"\\\t\n\r";
+        constexpr std::string_view k_escapes = "\"\\tnr";
         std::string quoted = "\"";
         for (const char c : expression) {
-            quoted += c == '"' || c == '\\' ? std::string{'\\', c} : std::string{c};
+            const std::size_t special = k_special.find(c);
+            quoted += special == std::string_view::npos ? std::string{c}
+                                                        : std::string{'\\', k_escapes[special]};
         }
         json_ = diag::read_json(diag::make_source("test.json", quoted + "\""), report);
         REQUIRE(json_.has_value());

@@ -22,8 +22,9 @@ TEST_CASE("number form: every name becomes one plain identifier, and no two name
 
 TEST_CASE("number form: numbers have no exponent, and no sign without parentheses") {
     CHECK(form("0.0000001", number("1")) == "0.0000001");
-    CHECK(form("100000000000000000000000", number("1")) == "100000000000000000000000");
+    CHECK(form("1000000000000000", number("1")) == "1000000000000000");
     CHECK(form("-7.10", number("1")) == "(-7.1)");
+    CHECK(form("-pH", number("1")) == "(0 - v_pH)");
     CHECK(
         form("temperature > 0 '[degF]'", truth()).starts_with("(v_temperature > (-17.7777777777"));
 }

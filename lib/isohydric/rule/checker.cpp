@@ -6,9 +6,11 @@
 #include "isohydric/rule/detail/conversion.hpp"
 #include "isohydric/rule/detail/emptiness.hpp"
 #include "isohydric/rule/detail/grammar.hpp"
+#include "isohydric/rule/walk.hpp"
 
 #include <algorithm>
 #include <charconv>
+#include <cmath>
 #include <utility>
 
 #include <fmt/format.h>
@@ -54,6 +56,7 @@ class Checker {
             root = arithmetic_.in_unit(root, *wanted_.unit);
         }
         if (root) {
+            check_literals(*root);
             check_choices(*root, report_);
         }
         return root;
@@ -117,6 +120,18 @@ class Checker {
         }
         return nodes.size() == syntax.children.size() ? std::optional(std::move(nodes))
                                                       : std::nullopt;
+    }
+
+    /// Conversion can bring a literal beyond the range of numbers.
+    void check_literals(const Expression& root) {
+        for_each_node(root, [this](const Expression& node) {
+            if (!std::isfinite(node.number)) {
+                report_.error("expression-number",
+                              node.place,
+                              fmt::format("in {}, the unit of evaluation, this number is too great",
+                                          node.unit.code()));
+            }
+        });
     }
 
     // ---- leaves
@@ -220,7 +235,11 @@ class Checker {
             return second ? arithmetic_.comparison(syntax, first, second) : nullptr;
         }
         if (first && first->type == Type::code) {
-            typed(left, Type::truth, "\"=\" without a text");
+            report_.error("expression-code",
+                          right.place,
+                          fmt::format("{} is compared with one of its codes only, as a text in "
+                                      "quotes: context.onset = 'chronic'",
+                                      first->text));
             return nullptr;
         }
         ExpressionPtr second = typed(right, Type::truth, "\"=\" behind a truth");

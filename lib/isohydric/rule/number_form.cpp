@@ -51,7 +51,8 @@ std::string number_form(const Expression& expression) {
                arguments(expression, 1);
     }
     if (expression.kind == NodeKind::negate) {
-        return "(-" + number_form(*expression.children[0]) + ")";
+        const bool literal_below = expression.children[0]->kind == NodeKind::number_literal;
+        return (literal_below ? "(-" : "(0 - ") + number_form(*expression.children[0]) + ")";
     }
     if (expression.kind == NodeKind::iif) {
         return "iif" + arguments(expression, 0);

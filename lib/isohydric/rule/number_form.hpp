@@ -9,6 +9,7 @@
 namespace isohydric::rule {
 
 /// The number form: literals as plain numbers in the unit of their node, codes as texts, names as `number_form_name`.
+/// A minus before anything but a literal becomes a difference from 0, because engines disagree on the minus of empty.
 [[nodiscard]] std::string number_form(const Expression& expression);
 
 /// The identifier that stands for a name in the number form: `v_` and the name, `_` for a point, `__` for a hyphen
