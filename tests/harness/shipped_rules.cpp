@@ -24,16 +24,21 @@ const auto& member(const List& list, const std::string& wanted, Id id) {
 
 }  // namespace
 
-std::shared_ptr<const engine::Program> shipped_program() {
-    static const std::shared_ptr<const engine::Program> program = [] {
+std::shared_ptr<const rule::RuleSet> shipped_rules() {
+    static const std::shared_ptr<const rule::RuleSet> rules = [] {
         diag::Report report;
-        const auto rules = rule::read_rule_set("sets/default.json",
-                                               io::rule_tree(ISOHYDRIC_SOURCE_DIR "/rules"),
-                                               engine::model_signatures(),
-                                               report);
-        REQUIRE_MESSAGE(rules, diag::render(report));
-        return std::make_shared<const engine::Program>(rules);
+        auto read = rule::read_rule_set("sets/default.json",
+                                        io::rule_tree(ISOHYDRIC_SOURCE_DIR "/rules"),
+                                        engine::model_signatures(),
+                                        report);
+        REQUIRE_MESSAGE(read, diag::render(report));
+        return read;
     }();
+    return rules;
+}
+
+std::shared_ptr<const engine::Program> shipped_program() {
+    static const auto program = std::make_shared<const engine::Program>(shipped_rules());
     return program;
 }
 

@@ -15,7 +15,10 @@ namespace isohydric::harness {
 
 using Texts = std::initializer_list<std::pair<const char*, const char*>>;
 
-/// The shipped rule set, compiled once for the whole test program. Fails the test if it has errors.
+/// The shipped rule set, read once for the whole test program. Fails the test if it has errors.
+[[nodiscard]] std::shared_ptr<const rule::RuleSet> shipped_rules();
+
+/// The same, compiled with everything in it.
 [[nodiscard]] std::shared_ptr<const engine::Program> shipped_program();
 
 /// A panel from texts; fails the test if one cannot be read.

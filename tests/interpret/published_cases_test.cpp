@@ -1,4 +1,10 @@
 // The labelled cases of tests/published/worked_cases.json against the shipped rules: each with its source.
+#include "isohydric/diag/json.hpp"
+#include "isohydric/diag/render.hpp"
+#include "isohydric/interpret/interpreter.hpp"
+#include "isohydric/io/files.hpp"
+#include "isohydric/panel/reading.hpp"
+
 #include <doctest/doctest.h>
 
 #include <algorithm>
@@ -7,11 +13,6 @@
 #include <vector>
 
 #include "harness/shipped_rules.hpp"
-#include "isohydric/diag/json.hpp"
-#include "isohydric/diag/render.hpp"
-#include "isohydric/io/files.hpp"
-#include "isohydric/interpret/interpreter.hpp"
-#include "isohydric/panel/reading.hpp"
 
 namespace {
 
@@ -62,7 +63,8 @@ WorkedCase read_case(const diag::Json& json) {
 const std::vector<WorkedCase>& cases() {
     static const std::vector<WorkedCase> all = [] {
         diag::Report report;
-        const auto source = io::read_source(ISOHYDRIC_SOURCE_DIR "/tests/published/worked_cases.json");
+        const auto source =
+            io::read_source(ISOHYDRIC_SOURCE_DIR "/tests/published/worked_cases.json");
         REQUIRE(source);
         const auto document = diag::read_json(*source, report);
         REQUIRE_MESSAGE(document, diag::render(report));
@@ -112,23 +114,27 @@ Score score(bool with_onset) {
         if (worked.what != "labelled") {
             continue;
         }
-        const std::vector<std::string> sets = harness::explanation_sets(interpret_case(worked, with_onset));
+        const std::vector<std::string> sets =
+            harness::explanation_sets(interpret_case(worked, with_onset));
         const bool first = !sets.empty() && sets.front() == worked.disorders;
         const bool among = std::find(sets.begin(), sets.end(), worked.disorders) != sets.end();
         ++result.cases;
         result.first += first ? 1U : 0U;
         result.among += among ? 1U : 0U;
         if (!first) {
-            MESSAGE(worked.id << std::string(among ? " among: " : " MISSED: ") << worked.disorders << " in [" << listed(sets) << "]");
+            MESSAGE(worked.id << std::string(among ? " among: " : " MISSED: ") << worked.disorders
+                              << " in [" << listed(sets) << "]");
         }
     }
-    MESSAGE(std::string(with_onset ? "onset as stated: " : "onset withheld: ") << result.cases << " cases, first " << result.first << ", among " << result.among);
+    MESSAGE(std::string(with_onset ? "onset as stated: " : "onset withheld: ")
+            << result.cases << " cases, first " << result.first << ", among " << result.among);
     return result;
 }
 
 }  // namespace
 
-TEST_CASE("published cases: the source's set is first in 80 % and listed in 95 %, onset as stated") {
+TEST_CASE(
+    "published cases: the source's set is first in 80 % and listed in 95 %, onset as stated") {
     const Score result = score(true);
     REQUIRE(result.cases >= 30);
     CHECK(result.first * 100 >= result.cases * 80);
@@ -154,9 +160,12 @@ TEST_CASE("published cases: the kind of gap agrees") {
         if (found == sets.end()) {
             continue;  // counted as missed above
         }
-        const interpret::ExplanationResult& explanation = result.explanations[static_cast<std::size_t>(found - sets.begin())];
+        const interpret::ExplanationResult& explanation =
+            result.explanations[static_cast<std::size_t>(found - sets.begin())];
         for (const std::string& kind : worked.gap) {
-            CHECK_MESSAGE(std::count(explanation.disorders.begin(), explanation.disorders.end(), kind) == 1, worked.id << " " << kind);
+            CHECK_MESSAGE(
+                std::count(explanation.disorders.begin(), explanation.disorders.end(), kind) == 1,
+                worked.id << " " << kind);
         }
         ++compared;
     }
@@ -170,9 +179,11 @@ TEST_CASE("published cases: contradictory and artefact panels are refused or war
             continue;
         }
         const interpret::Interpretation result = interpret_case(worked, true);
-        const bool said = std::any_of(result.checks.begin(), result.checks.end(), [](const interpret::CheckResult& check) {
-            return check.outcome == interpret::Outcome::stop || check.outcome == interpret::Outcome::warn;
-        });
+        const bool said = std::any_of(
+            result.checks.begin(), result.checks.end(), [](const interpret::CheckResult& check) {
+                return check.outcome == interpret::Outcome::stop ||
+                       check.outcome == interpret::Outcome::warn;
+            });
         CHECK_MESSAGE(said, worked.id);
         ++seen;
     }
@@ -182,26 +193,31 @@ TEST_CASE("published cases: contradictory and artefact panels are refused or war
 TEST_CASE("published cases: reference sets of their context read as physiological") {
     for (const WorkedCase& worked : cases()) {
         if (worked.what == "physiological") {
-            const std::vector<std::string> sets = harness::explanation_sets(interpret_case(worked, true));
-            CHECK_MESSAGE((!sets.empty() && sets.front() == "none"), worked.id << " [" << listed(sets) << "]");
+            const std::vector<std::string> sets =
+                harness::explanation_sets(interpret_case(worked, true));
+            CHECK_MESSAGE((!sets.empty() && sets.front() == "none"),
+                          worked.id << " [" << listed(sets) << "]");
         }
     }
 }
 
-TEST_CASE("published cases: at 8400 m a single chronic respiratory alkalosis, expected for altitude [@grocott2009, table of four samples]") {
+TEST_CASE("published cases: at 8400 m a single chronic respiratory alkalosis, expected for "
+          "altitude [@grocott2009, table of four samples]") {
     for (const WorkedCase& worked : cases()) {
         if (worked.id < "M13" || worked.id > "M16") {
             continue;
         }
         const interpret::Interpretation result = interpret_case(worked, false);
-        REQUIRE_MESSAGE(result.explanations.size() == 1, worked.id << " [" << listed(harness::explanation_sets(result)) << "]");
+        REQUIRE_MESSAGE(result.explanations.size() == 1,
+                        worked.id << " [" << listed(harness::explanation_sets(result)) << "]");
         CHECK(harness::explanation_sets(result).front() == "respiratory-alkalosis");
         CHECK(result.explanations.front().onsets == std::vector<rule::Onset>{rule::Onset::chronic});
         CHECK(harness::finding_of(result, "altitude-response").state == interpret::Truth::yes);
     }
 }
 
-TEST_CASE("published cases: chemistry alone gives metabolic acidosis of the high-gap kind [@cicm-papers, 2005 paper 2 question 11]") {
+TEST_CASE("published cases: chemistry alone gives metabolic acidosis of the high-gap kind "
+          "[@cicm-papers, 2005 paper 2 question 11]") {
     for (const WorkedCase& worked : cases()) {
         if (worked.id == "A19" || worked.id == "A31") {
             const interpret::Interpretation result = interpret_case(worked, false);
@@ -209,7 +225,8 @@ TEST_CASE("published cases: chemistry alone gives metabolic acidosis of the high
             const std::vector<std::string>& disorders = result.explanations.front().disorders;
             CHECK(harness::explanation_sets(result).front() == "metabolic-acidosis");
             CHECK(std::count(disorders.begin(), disorders.end(), "high-anion-gap-acidosis") == 1);
-            CHECK(harness::disorder_of(result, "respiratory-acidosis").bicarbonate == interpret::Verdict::unknown);
+            CHECK(harness::disorder_of(result, "respiratory-acidosis").bicarbonate ==
+                  interpret::Verdict::unknown);
         }
     }
 }

@@ -42,10 +42,12 @@ using LastReads = std::map<Slot, std::size_t>;
 /// Hands out columns, those that were free for the shortest time first, since they are still in the cache.
 class ColumnPool {
   public:
+    [[nodiscard]] Slot take_new(SlotKind kind) { return {kind, count_of(counts_, kind)++}; }
+
     [[nodiscard]] Slot take(SlotKind kind) {
         std::vector<Slot>& free = free_[kind];
         if (free.empty()) {
-            return {kind, count_of(counts_, kind)++};
+            return take_new(kind);
         }
         const Slot slot = free.back();
         free.pop_back();
@@ -73,7 +75,9 @@ SlotCounts reuse_columns(std::vector<Operation>& operations, const std::vector<S
         if (!last_reads.contains(operation.result)) {
             continue;
         }
-        const Slot column = pool.take(operation.result.kind);
+        // A constant is written once, before the first block: its column must never have been another's.
+        const SlotKind kind = operation.result.kind;
+        const Slot column = is_constant(operation.code) ? pool.take_new(kind) : pool.take(kind);
         columns.emplace(operation.result, column);
         operation.result = column;
         std::vector<Slot> finished;
