@@ -1,22 +1,11 @@
-// Precedence, places and messages of the parser. The trees that precedence gives are shown by the parentheses of the
-// number form.
+// Precedence, places and messages of the parser.
 #include "rule/expression_fixture.hpp"
+#include "rule/syntax_tree.hpp"
 
 namespace isohydric::rule::testing {
 namespace {
 
-/// What the parser makes of an expression, fully parenthesised, without the checker.
-std::string tree(const Syntax& node) {
-    if (node.children.empty()) {
-        return node.kind == NodeKind::name ? written_name(node.path) : node.text;
-    }
-    std::string inner;
-    for (const Syntax& child : node.children) {
-        inner += " " + tree(child);
-    }
-    return "(" + node.text + inner + ")";
-}
-
+/// What the parser makes of an expression, without the checker, or its diagnostics.
 std::string tree(const std::string& expression) {
     Text text(expression);
     const std::optional<Syntax> parsed = text.parse();
