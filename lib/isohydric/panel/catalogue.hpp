@@ -31,7 +31,17 @@ struct CustomaryUnit {
     bool bare = false;      ///< a number without a unit may mean it; always so of the canonical one
     std::vector<std::string> presets;  ///< `si`, `conventional`: sites that use it
 
-    [[nodiscard]] double to_canonical(double written) const { return written * factor + offset; }
+    /// Text and qualifier: `mmol/L monomer`.
+    [[nodiscard]] std::string spoken() const {
+        return qualifier.empty() ? text : text + " " + qualifier;
+    }
+
+    /// A difference. Where the factor is below one, its inverse divides, so that 95 % are 0.95 to the bit.
+    [[nodiscard]] double scaled(double written) const {
+        return factor < 1 ? written / (1 / factor) : written * factor;
+    }
+
+    [[nodiscard]] double to_canonical(double written) const { return scaled(written) + offset; }
 };
 
 /// Two ends, both inclusive.

@@ -79,7 +79,7 @@ struct Context {
 [[nodiscard]] diag::Result<Population> read_population(std::string_view text);
 [[nodiscard]] diag::Result<StatedOnset> read_onset(std::string_view text);
 
-/// An age with its unit (`15min`, `6h`, `3d`, `5wk`, `2mo`, `4y` or `4a`) in years of 365.25 days [@ucum, table 3].
+/// An age with its unit (`15min`, `6h`, `3d`, `5wk`, `2mo`, `4y` or `4a`) in years of 365.25 days [@ucum, section 4.3].
 [[nodiscard]] diag::Result<double> read_age_a(std::string_view text);
 
 /// An altitude in metres, bare or as `3510m`, `3.5km`; between the Dead Sea and the highest summit.

@@ -6,6 +6,7 @@
 
 #include <algorithm>
 #include <cmath>
+#include <cstdint>
 #include <utility>
 #include <vector>
 
@@ -56,8 +57,7 @@ Linear linear_between(const units::Unit& from, const units::Unit& to) {
 std::string known_units(const AnalyteInfo& info) {
     std::vector<std::string> known;
     for (const CustomaryUnit& unit : info.customary) {
-        const std::string name =
-            unit.qualifier.empty() ? unit.text : fmt::format("{} {}", unit.text, unit.qualifier);
+        const std::string name = unit.spoken();
         if (!name.empty() && std::ranges::find(known, name) == known.end()) {
             known.push_back(name);
         }
@@ -74,14 +74,14 @@ diag::Unexpected<std::string> unfit(const AnalyteInfo& info, std::string_view un
 }
 
 diag::Result<Linear> linear_from_charges(const AnalyteInfo& info, const units::Unit& from) {
-    if (!info.charge) {
-        return diag::unexpected(
-            fmt::format("{} cannot be given in {}: {}",
-                        info.id(),
-                        from.code(),
-                        info.no_charge.empty() ? "it has no fixed charge" : info.no_charge));
+    if (info.charge && units::commensurable(from, info.unit)) {
+        return Linear{.factor = units::factor_between(from, info.unit) / *info.charge, .offset = 0};
     }
-    return Linear{.factor = units::factor_between(from, info.unit) / *info.charge, .offset = 0};
+    if (info.no_charge.empty()) {
+        return unfit(info, from.code());
+    }
+    return diag::unexpected(
+        fmt::format("{} cannot be given in {}: {}", info.id(), from.code(), info.no_charge));
 }
 
 /// What a hydrogen ion concentration given as pH is told; empty if it is none.
@@ -96,7 +96,7 @@ std::string hydrogen_ion_hint(const AnalyteInfo& info, bool looks_like_it) {
 /// Whether amounts may stand where the canonical unit counts something else: mmol/kg for osmolality, a bare 1 for pH.
 bool may_stand_for(const units::Unit& from, const units::Unit& canonical) {
     const Counts wanted = counts(canonical);
-    return counts(from) == Counts::particles &&
+    return counts(from) == Counts::particles && units::commensurable(from, canonical) &&
            (wanted == Counts::osmoles ||
             (wanted == Counts::ph && without_annotations(from.code()) == "1"));
 }
@@ -149,6 +149,28 @@ CustomaryUnit seen_through(const CustomaryUnit& known,
         unit.offset = step.offset * known.factor + known.offset;
     }
     return unit;
+}
+
+/// The parsed unit seen through each customary unit of its kind, the one nearest to what was written first.
+std::vector<CustomaryUnit> readings_of(const std::vector<const CustomaryUnit*>& customary,
+                                       const units::Unit& parsed,
+                                       const QualifiedUnit& written) {
+    std::vector<CustomaryUnit> same_code;
+    std::vector<CustomaryUnit> same_unit;
+    std::vector<CustomaryUnit> same_kind;
+    for (const CustomaryUnit* known : customary) {
+        const units::Unit unit = *units::parse_unit(known->ucum);
+        const bool said = written.qualifier.empty() || known->qualifier == written.qualifier;
+        if (said && alike(parsed, unit)) {
+            auto& list = parsed.code() == known->ucum ? same_code
+                         : parsed == unit             ? same_unit
+                                                      : same_kind;
+            list.push_back(seen_through(*known, unit, parsed, written.unit));
+        }
+    }
+    same_code.insert(same_code.end(), same_unit.begin(), same_unit.end());
+    same_code.insert(same_code.end(), same_kind.begin(), same_kind.end());
+    return same_code;
 }
 
 diag::Result<units::Unit> parse_written(std::string_view written) {
@@ -216,17 +238,16 @@ std::string with_unit(std::string_view digits, std::string_view text) {
 diag::Result<Linear> linear_to_canonical(const AnalyteInfo& info,
                                          const units::Unit& from,
                                          std::optional<double> molar_mass_g_mol) {
-    if (units::commensurable(from, info.unit)) {
-        if (alike(from, info.unit) || may_stand_for(from, info.unit)) {
-            return linear_between(from, info.unit);
-        }
-        if (counts(from) == Counts::charges && counts(info.unit) == Counts::particles) {
-            return linear_from_charges(info, from);
-        }
-    } else if (molar_mass_g_mol) {
+    if (counts(from) == Counts::charges) {
+        return linear_from_charges(info, from);
+    }
+    if (alike(from, info.unit) || may_stand_for(from, info.unit)) {
+        return linear_between(from, info.unit);
+    }
+    if (molar_mass_g_mol && counts(from) == Counts::particles) {
         const std::optional<double> factor =
             units::factor_by_molar_mass(from, info.unit, *molar_mass_g_mol);
-        if (factor && counts(from) == Counts::particles) {
+        if (factor) {
             return Linear{.factor = *factor, .offset = 0};
         }
     }
@@ -240,16 +261,8 @@ diag::Result<CustomaryUnit> unit_as_written(const WrittenValue& value, std::stri
     if (!parsed) {
         return diag::unexpected(parsed.error());
     }
-    std::vector<CustomaryUnit> readings;
-    for (const CustomaryUnit* known : of_variant(info, value.variant)) {
-        const units::Unit known_unit = *units::parse_unit(known->ucum);
-        const bool said = qualified.qualifier.empty() || known->qualifier == qualified.qualifier;
-        if (said && alike(*parsed, known_unit)) {
-            const bool exact = *parsed == known_unit;
-            readings.insert(exact ? readings.begin() : readings.end(),
-                            seen_through(*known, known_unit, *parsed, qualified.unit));
-        }
-    }
+    const std::vector<CustomaryUnit> readings =
+        readings_of(of_variant(info, value.variant), *parsed, qualified);
     const bool ambiguous =
         readings.size() > 1 && qualified.qualifier.empty() && !readings.front().qualifier.empty();
     if (ambiguous) {
@@ -320,9 +333,7 @@ std::optional<CustomaryUnit> unit_needless(const AnalyteInfo& info, std::string_
 }
 
 std::string describe_reading(const WrittenValue& value, const CustomaryUnit& unit) {
-    const std::string name =
-        unit.qualifier.empty() ? unit.text : fmt::format("{} {}", unit.text, unit.qualifier);
-    const std::string written = with_unit(value.number.digits, name);
+    const std::string written = with_unit(value.number.digits, unit.spoken());
     if (unit.factor == 1 && unit.offset == 0) {
         return written;
     }

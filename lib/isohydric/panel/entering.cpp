@@ -30,12 +30,8 @@ std::string text_of(const units::QuantityText& quantity, const CustomaryUnit& un
     } else if (quantity.censoring == Censoring::above) {
         text.insert(0, ">");
     }
-    if (!quantity.unit.empty()) {
-        for (const std::string& word : {unit.text, unit.qualifier}) {
-            text += word.empty() ? "" : " " + word;
-        }
-    }
-    return text;
+    const std::string unit_text = quantity.unit.empty() ? std::string{} : unit.spoken();
+    return unit_text.empty() ? text : fmt::format("{} {}", text, unit_text);
 }
 
 std::string notes(const Catalogue::Alias& alias, const CustomaryUnit& unit) {
@@ -90,7 +86,7 @@ diag::Result<Entered> enter(const AnalyteInfo& info,
     const double value = unit.to_canonical(quantity.number.value);
     Entered entered;
     entered.value = alias.negated ? -value : value;
-    entered.half_digit = half_of_last_digit(quantity.number.decimals) * std::abs(unit.factor);
+    entered.half_digit = unit.scaled(half_of_last_digit(quantity.number.decimals));
     entered.as_entered = text_of(quantity, unit);
     entered.note = notes(alias, unit);
     entered.censoring = alias.negated ? mirrored(quantity.censoring) : quantity.censoring;

@@ -122,7 +122,7 @@ std::optional<Analyte> CatalogueReader::read_id(ObjectReader& reader) {
     const std::optional<Analyte> analyte = analyte_of(id->text());
     if (!analyte) {
         const std::string near = diag::nearest(id->text(), k_analyte_ids);
-        report_.error("catalogue-analyte-unknown",
+        report_.error("catalogue-analyte",
                       id->place(),
                       fmt::format("there is no analyte \"{}\"{}; the list of analytes is fixed",
                                   id->text(),
@@ -197,7 +197,7 @@ void CatalogueReader::read_alias(const Json& value, AnalyteInfo& info) {
 void CatalogueReader::add_name(std::string written, Catalogue::Alias meaning, const Place& place) {
     const std::string shown = written;
     if (fold_name(written).empty()) {
-        report_.error("catalogue-value", place, "a name must have letters");
+        report_.error("catalogue-name", place, "a name must have letters");
         return;
     }
     const Catalogue::Name* first = catalogue_.add_name({.written = std::move(written),
@@ -206,7 +206,7 @@ void CatalogueReader::add_name(std::string written, Catalogue::Alias meaning, co
                                                         .place = place});
     if (first != nullptr) {
         report_
-            .error("catalogue-name-clash",
+            .error("catalogue-name",
                    place,
                    fmt::format("the name \"{}\" cannot be told from \"{}\" of {}; letter case and "
                                "separators do not count",

@@ -118,8 +118,9 @@ std::optional<CustomaryUnit> PanelReader::unit_of_site(const Item& item) const {
         return std::nullopt;
     }
     CustomaryUnit unit = *stated;
-    if (!unit.text.empty()) {
-        add_note(unit, fmt::format("unit of the site: {}", unit.text));
+    const std::string name = unit.spoken();
+    if (!name.empty()) {
+        add_note(unit, fmt::format("unit of the site: {}", name));
     }
     return unit;
 }
@@ -157,10 +158,25 @@ diag::Result<CustomaryUnit> PanelReader::unit_of_bare_item(const Item& item) con
     return unit;
 }
 
+/// A written unit; the site may have said what the unit alone leaves open: `mmol/L` of haemoglobin, monomer.
+diag::Result<CustomaryUnit> PanelReader::unit_of_written_item(const Item& item) const {
+    const WrittenValue value = written_value(item);
+    diag::Result<CustomaryUnit> unit = unit_as_written(value, item.quantity.unit);
+    const std::optional<CustomaryUnit> stated = unit_of_site(item);
+    if (unit || !stated || stated->qualifier.empty()) {
+        return unit;
+    }
+    unit = unit_as_written(value, fmt::format("{} {}", item.quantity.unit, stated->qualifier));
+    if (unit) {
+        add_note(*unit, fmt::format("{} by the units of the site", stated->qualifier));
+    }
+    return unit;
+}
+
 std::optional<CustomaryUnit> PanelReader::find_unit(const Item& item) {
     const std::string& written = item.quantity.unit;
     diag::Result<CustomaryUnit> unit =
-        written.empty() ? unit_of_bare_item(item) : unit_as_written(written_value(item), written);
+        written.empty() ? unit_of_bare_item(item) : unit_of_written_item(item);
     if (unit) {
         return *std::move(unit);
     }

@@ -63,6 +63,7 @@ class PanelReader {
     [[nodiscard]] std::optional<CustomaryUnit> unit_of_site(const Item& item) const;
     [[nodiscard]] diag::Result<CustomaryUnit> unit_of_other(const Item& item, Analyte other) const;
     [[nodiscard]] diag::Result<CustomaryUnit> unit_of_bare_item(const Item& item) const;
+    [[nodiscard]] diag::Result<CustomaryUnit> unit_of_written_item(const Item& item) const;
     std::optional<CustomaryUnit> find_unit(const Item& item);
     std::optional<Entered> read_item(const Item& item);
     void read_values();
