@@ -192,16 +192,16 @@ TEST_CASE("json limits: many names, all different or all the same, take no quadr
 }
 
 TEST_CASE("json limits: ten million bytes of text, of numbers, of faults") {
-    const ReadText string('"' + std::string(10'000'000, 'a') + '"');
+    const ReadText string('"' + repeated("a", 10'000'000) + '"');
     REQUIRE(string.json);
     CHECK(string.json->text().size() == 10'000'000);
     const ReadText numbers('[' + repeated("0,", 5'000'000) + "0]");
     REQUIRE(numbers.json);
     CHECK(numbers.json->items().size() == 5'000'001);
     CHECK(numbers.json->items().back().place().span == Span{10'000'001, 10'000'002});
-    const ReadText open(std::string("[\"") + std::string(10'000'000, '\\'));
+    const ReadText open("[\"" + repeated("\\", 10'000'000));
     CHECK(render(open.report).size() < 1000);
-    const ReadText word(std::string(10'000'000, 'x'));
+    const ReadText word(repeated("x", 10'000'000));
     CHECK(render(word.report).size() < 1000);
     static_assert(sizeof(Json) <= 80);
 }
