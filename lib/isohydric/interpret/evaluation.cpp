@@ -70,6 +70,10 @@ Contradicted::Contradicted(const rule::RuleSet& rules, const std::vector<std::ui
     }
     while (!analytes.empty() && spread(rules)) {
     }
+    any_explanation_ =
+        std::any_of(rules.explanations.begin(),
+                    rules.explanations.end(),
+                    [&](const rule::Explanation& entry) { return rests(*entry.when); });
 }
 
 bool Contradicted::rests(const rule::Symbol& symbol) const {

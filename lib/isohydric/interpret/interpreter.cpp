@@ -2,23 +2,32 @@
 
 #include "isohydric/interpret/detail/assemble.hpp"
 
-#include <algorithm>
+#include <cstdint>
 #include <utility>
+#include <vector>
 
 namespace isohydric::interpret {
 
 namespace {
 
-std::vector<std::uint32_t> contradicted_analytes(const Evaluation& evaluation) {
-    std::vector<std::uint32_t> analytes;
+/// What the stop checks that hold say of the panel.
+struct Stopped {
+    std::vector<std::uint32_t> analytes;  ///< in contradiction
+    bool everything = false;              ///< a check that names no analyte doubts the whole panel
+};
+
+Stopped stopped_by(const Evaluation& evaluation) {
+    Stopped stopped;
     const rule::RuleSet& rules = evaluation.rules();
     for (std::uint32_t i = 0; i < rules.checks.size(); ++i) {
         const rule::Check& check = rules.checks[i];
         if (check.stops && evaluation.truth(evaluation.program().check(i)) == Truth::yes) {
-            analytes.insert(analytes.end(), check.contradicts.begin(), check.contradicts.end());
+            stopped.everything = stopped.everything || check.contradicts.empty();
+            stopped.analytes.insert(
+                stopped.analytes.end(), check.contradicts.begin(), check.contradicts.end());
         }
     }
-    return analytes;
+    return stopped;
 }
 
 }  // namespace
@@ -33,15 +42,13 @@ Interpretation Interpreter::interpret(const panel::Panel& panel) {
     engine::evaluate(*program_, block_, scratch_);
 
     const Evaluation evaluation(*program_, scratch_, panel);
-    const Contradicted contradicted(program_->rules(), contradicted_analytes(evaluation));
+    const Stopped stopped = stopped_by(evaluation);
+    const Contradicted contradicted(program_->rules(), stopped.analytes);
     Interpretation result;
     result.program = program_;
     result.panel = panel;
     result.checks = check_results(evaluation);
-    result.interpretable =
-        std::none_of(result.checks.begin(), result.checks.end(), [](const CheckResult& check) {
-            return check.outcome == Outcome::stop;
-        });
+    result.interpretable = !stopped.everything && !contradicted.any_explanation();
     result.critical = critical_values(evaluation);
     result.entered = analyte_results(evaluation);
     result.quantities = quantity_results(evaluation, contradicted);

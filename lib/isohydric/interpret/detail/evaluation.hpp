@@ -23,6 +23,9 @@ class Contradicted {
 
     [[nodiscard]] bool finding(std::uint32_t index) const { return findings_[index]; }
 
+    /// Whether any explanation rests on them: then none is given.
+    [[nodiscard]] bool any_explanation() const { return any_explanation_; }
+
   private:
     [[nodiscard]] bool rests(const rule::Expression& expression) const;
     [[nodiscard]] bool rests(const rule::Symbol& symbol) const;
@@ -30,6 +33,7 @@ class Contradicted {
     bool spread(const rule::RuleSet& rules);
 
     std::vector<bool> analytes_, quantities_, conditions_, findings_;
+    bool any_explanation_ = false;
 };
 
 class Evaluation {
