@@ -72,25 +72,26 @@ void Compiler::compile() {
         compile_explanation(index);
     }
     if (selection_.everything) {
-        for (const rule::Group& group : rules_.groups) {
-            if (group.domain) {
-                expression(*group.domain);
-            }
-        }
-        for (const rule::Disorder& disorder : rules_.disorders) {
-            if (disorder.judged_when) {
-                expression(*disorder.judged_when);
-            }
-        }
-        for (std::uint32_t name_index = 0; name_index < rules_.interval_names.size();
-             ++name_index) {
-            interval(name_index);
-        }
+        compile_bystanders();
     }
     program_.slots_ = emitter_.slots();
     program_.operations_ = emitter_.take();
     if (!selection_.keep_nodes) {
         forget_unselected();
+    }
+}
+
+/// Expressions of entries that have no state of their own.
+void Compiler::compile_bystanders() {
+    for (const rule::Group& group : rules_.groups) {
+        if (group.domain) {
+            expression(*group.domain);
+        }
+    }
+    for (const rule::Disorder& disorder : rules_.disorders) {
+        if (disorder.judged_when) {
+            expression(*disorder.judged_when);
+        }
     }
 }
 

@@ -21,6 +21,7 @@ class Compiler {
     void compile_check(std::uint32_t index);
     void compile_critical(std::uint32_t index);
     void compile_explanation(std::uint32_t index);
+    void compile_bystanders();
     void compile_sentence(std::string_view sentence);
     void forget_unselected();
 

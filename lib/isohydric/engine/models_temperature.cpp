@@ -1,5 +1,6 @@
 // pH, pCO2 and pO2 of the same blood at another temperature, and back to 37 degC.
 #include "isohydric/chem/po2_temperature_clsi.hpp"
+#include "isohydric/chem/severinghaus_1979.hpp"
 #include "isohydric/chem/temperature.hpp"
 #include "isohydric/engine/model_registry.hpp"
 
@@ -73,6 +74,18 @@ void add_po2(Models& models) {
         result("pO2", "mm[Hg]"),
         po2_port,
         temperature_port());
+    add_model(
+        models,
+        "temperature.log10PO2PerDegCClsi",
+        [](auto po2_mmHg) { return chem::po2_temperature_clsi::log10_po2_per_degC(po2_mmHg); },
+        result("slope", "/K"),
+        po2_port);
+    add_model(
+        models,
+        "temperature.lnPO2PerDegCSeveringhaus1979",
+        [](auto po2_mmHg) { return chem::severinghaus_1979::ln_po2_per_degC(po2_mmHg); },
+        result("slope", "/K"),
+        po2_port);
 }
 
 }  // namespace

@@ -72,6 +72,12 @@ void add_water_models(Models& models) {
         k_harned_owen_degC);
     add_by_temperature(
         models,
+        "water.densityKell1975",
+        [](auto temperature_degC) { return density_g_cm3(temperature_degC); },
+        result("density", "g/cm3"),
+        k_liquid_degC);
+    add_by_temperature(
+        models,
         "water.neutralPH",
         [](auto temperature_degC) { return chem::neutral_ph::at_temperature(temperature_degC); },
         result("pH", "1"),

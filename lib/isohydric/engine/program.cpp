@@ -60,6 +60,15 @@ std::optional<Slot> Program::node(const rule::Expression& expression) const {
 }
 
 std::optional<Slot> Program::name(const rule::Symbol& symbol) const {
+    if (symbol.kind == rule::SymbolKind::quantity) {
+        return quantity(symbol.index);
+    }
+    if (symbol.kind == rule::SymbolKind::condition) {
+        return condition(symbol.index);
+    }
+    if (symbol.kind == rule::SymbolKind::finding) {
+        return finding(symbol.index);
+    }
     const auto found = names_.find(symbol);
     return found == names_.end() ? std::nullopt : std::optional(found->second);
 }
