@@ -12,7 +12,7 @@
 
 namespace isohydric::diag {
 
-using std::string_literals::operator""s;
+using namespace std::string_literals;
 
 namespace {
 

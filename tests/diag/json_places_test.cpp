@@ -67,8 +67,8 @@ bool same_when_read_alone(const Json& value) {
     });
 }
 
-constexpr std::string_view k_everything = R"( {
-	"null": null , "yes":true,"no" : false,
+constexpr std::string_view k_everything = " {\n\t"
+                                          R"("null": null , "yes":true,"no" : false,
   "numbers": [0, -0, 12, -7.40, 1e2 ,2E+2, 0.50e-3,18446744073709551615,-9223372036854775808, 123456789012345678901234567890],
   "caf\u00e9\n": ["", "a\"b\\", "\ud834\udd1e \u20ac \u00b5 \u0041", "{[,:]}" ],
   "nested": {"a": [[], {}, [ ], { }, [[1,[2]],{"b":{"c":null}}]]}
