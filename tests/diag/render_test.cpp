@@ -60,6 +60,8 @@ TEST_CASE("render: controls, invisible characters and bytes that are not UTF-8 a
     CHECK(printable("\xC2\x9B"
                     "1") == "\\xC2\\x9B1");                 // a control of two bytes
     CHECK(printable("\xE2\x80\x8B") == "\\xE2\\x80\\x8B");  // zero width space
+    const std::string right_to_left{'\xE2', '\x80', '\xAE'};
+    CHECK(printable(right_to_left) == "\\xE2\\x80\\xAE");
     CHECK(printable("\xEF\xBB\xBF"
                     "1") == "\\xEF\\xBB\\xBF"
                             "1");  // byte order mark
