@@ -123,6 +123,9 @@ void Compiler::compile_explanation(std::uint32_t index) {
     }
     compile_sentence(explanation.states);
     compile_sentence(explanation.early_states);
+    if (explanation.early_when && selection_.keep_nodes) {
+        expression(*explanation.early_when);
+    }
 }
 
 void Compiler::compile_sentence(std::string_view sentence) {

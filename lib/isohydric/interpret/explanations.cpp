@@ -70,22 +70,27 @@ bool has_set(const std::vector<Candidate>& candidates, const DisorderSet& disord
     });
 }
 
-/// Explanations that hold if a response is not yet complete: named beside a fit of exactly the disorders they wait for.
-std::vector<Candidate> early(const rule::RuleSet& rules, const std::vector<Candidate>& fits) {
-    const auto fits_off_baseline = [&](const DisorderSet& disorders) {
+/// Explanations that hold if a response is not yet complete: named beside a fit of the disorders they wait for, in which the
+/// respiratory one has no onset of its own.
+std::vector<Candidate> early(const Evaluation& evaluation, const std::vector<Candidate>& fits) {
+    const rule::RuleSet& rules = evaluation.rules();
+    const auto waits = [&](const rule::Explanation& entry) {
         return std::any_of(fits.begin(), fits.end(), [&](const Candidate& candidate) {
-            return candidate.disorders == disorders &&
-                   std::any_of(candidate.entries.begin(),
-                               candidate.entries.end(),
-                               [&](std::uint32_t entry) {
-                                   return rules.explanations[entry].onset != rule::Onset::baseline;
-                               });
+            return candidate.disorders == entry.early_beside &&
+                   std::any_of(
+                       candidate.entries.begin(), candidate.entries.end(), [&](std::uint32_t fit) {
+                           return rules.explanations[fit].onset == rule::Onset::none;
+                       });
         });
+    };
+    const auto applies = [&](const rule::Explanation& entry) {
+        return !entry.early_when ||
+               evaluation.truth(evaluation.program().node(*entry.early_when)) == Truth::yes;
     };
     std::vector<Candidate> found;
     for (std::uint32_t i = 0; i < rules.explanations.size(); ++i) {
         const rule::Explanation& entry = rules.explanations[i];
-        if (!entry.early_beside.empty() && fits_off_baseline(entry.early_beside) &&
+        if (!entry.early_beside.empty() && waits(entry) && applies(entry) &&
             !has_set(fits, entry.disorders)) {
             found.push_back({entry.disorders, {i}, Fit::early});
         }
@@ -235,7 +240,7 @@ ExplanationResult explanation_result(const Evaluation& evaluation, const Candida
 std::vector<ExplanationResult> explanation_results(const Evaluation& evaluation) {
     const rule::RuleSet& rules = evaluation.rules();
     std::vector<Candidate> listed = minimal(rules, entries_that_hold(evaluation, k_panel_row));
-    const std::vector<Candidate> early_ones = early(rules, listed);
+    const std::vector<Candidate> early_ones = early(evaluation, listed);
     std::vector<Candidate> near_ones = near(evaluation, listed, early_ones);
     listed.insert(listed.end(), early_ones.begin(), early_ones.end());
     listed.insert(listed.end(), near_ones.begin(), near_ones.end());

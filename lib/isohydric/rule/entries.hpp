@@ -148,6 +148,7 @@ struct Explanation {
     std::vector<std::uint32_t>
         early_beside;  ///< listed as early beside a fit of exactly these disorders; empty: never
     std::string early_states;
+    ExpressionPtr early_when;  ///< where an incomplete response can be thought of; null: anywhere
     std::string states;
 };
 

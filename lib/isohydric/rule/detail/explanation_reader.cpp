@@ -52,6 +52,9 @@ void read_early(diag::ObjectReader& entry, Explanation& explanation, const Entry
     reader.required("beside", diag::Kind::array);
     explanation.early_beside = read_main_disorders(reader, "beside", context);
     explanation.early_states = read_sentence(reader, "states", context);
+    if (reader.any("when") != nullptr) {
+        explanation.early_when = read_truth(reader, "when", context);
+    }
     reader.finish();
 }
 
