@@ -81,7 +81,7 @@ void Compiler::compile() {
     }
 }
 
-/// Expressions of entries that have no state of their own.
+/// What belongs to everything and hangs on no entry with a state of its own.
 void Compiler::compile_bystanders() {
     for (const rule::Group& group : rules_.groups) {
         if (group.domain) {
@@ -92,6 +92,10 @@ void Compiler::compile_bystanders() {
         if (disorder.judged_when) {
             expression(*disorder.judged_when);
         }
+    }
+    // Entered values are shown against their intervals, whether or not an entry asks for these.
+    for (std::uint32_t name_index = 0; name_index < rules_.interval_names.size(); ++name_index) {
+        interval(name_index);
     }
 }
 

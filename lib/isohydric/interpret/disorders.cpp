@@ -146,42 +146,4 @@ std::vector<std::string> would_help(const Interpretation& so_far, const Evaluati
     return ordered;
 }
 
-std::vector<std::string> unchecked_ids(const Interpretation& so_far, const Evaluation& evaluation) {
-    std::vector<std::string> ids;
-    const auto add = [&](const std::string& id, const std::vector<rule::Citation>& sources) {
-        const bool unchecked =
-            std::any_of(sources.begin(), sources.end(), [](const rule::Citation& source) {
-                return !source.checked;
-            });
-        if (unchecked && !contains(ids, id)) {
-            ids.push_back(id);
-        }
-    };
-    for (const CriticalValue& value : so_far.critical) {
-        add(value.id, value.sources);
-    }
-    for (const QuantityResult& quantity : so_far.quantities) {
-        if (quantity.value) {
-            add(quantity.name, quantity.sources);
-            const std::optional<std::uint32_t> index =
-                evaluation.rules().find_quantity(quantity.name);
-            const rule::Interval* interval =
-                index ? evaluation.interval(evaluation.rules().quantities[*index].interval)
-                      : nullptr;
-            if (interval != nullptr) {
-                add(interval->head.id, interval->head.sources);
-            }
-        }
-    }
-    for (const FindingResult& finding : so_far.findings) {
-        if (finding.state == Truth::yes) {
-            add(finding.id, finding.sources);
-        }
-    }
-    for (const ExplanationResult& explanation : so_far.explanations) {
-        add(explanation.id, explanation.sources);
-    }
-    return ids;
-}
-
 }  // namespace isohydric::interpret
