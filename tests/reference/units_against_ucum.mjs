@@ -21,8 +21,8 @@ const MASS = ['mg/dL', 'g/L', 'mg/L', 'ug/mL', 'mg%'];
 const AMOUNT = ['mmol/L', 'umol/L', 'mmol/dL', 'nmol/mL'];
 const FRACTION = ['1', '%', '[ppth]', '10*-2', '{fraction}'];
 
-// Molar masses are those of the reference runs and tables, not the library's [@ciaaw2021, abridged standard atomic
-// weights]; haemoglobin and albumin are measured ones.
+// Molar masses are those of the reference runs and tables, not the library's
+// [@ciaaw2021, abridged standard atomic weights]; haemoglobin and albumin are measured ones.
 const ANALYTES = [
     { name: 'pressures', codes: PRESSURE },
     { name: 'sodium, potassium, chloride, bicarbonate, gaps, base excess', codes: ION, charge: 1 },

@@ -108,21 +108,3 @@ TEST_CASE("bibliography: keys are unique, and lines are short") {
     sources = "@@{}";
     test::check_complaint(tree, "json-wrong-kind");
 }
-
-TEST_CASE("bibliography: what nothing cites is a warning once the cases are read") {
-    test::RuleTree tree = test::base_tree();
-    CHECK_FALSE(test::read(tree).has("rule-source-unused"));
-    const rule::ReadOptions with_cases{.with_cases = true};
-    const test::Reading unused = test::read(tree, "set.json", with_cases);
-    CHECK(unused.has("rule-source-unused"));
-    CHECK(unused.rules != nullptr);
-    tree["rules.cases.json"] =
-        R"([{"id": "a", "panel": {"Na": "140 mmol/L"}, "expect": {"hasNa": "yes"},
-      "source": {"ref": "known2001", "at": "case 1"}}])";
-    CHECK_FALSE(test::read(tree, "set.json", with_cases).has("rule-source-unused"));
-    tree.erase("rules.cases.json");
-    tree["sources.json"].insert(
-        1, R"({"id": "code1", "type": "book", "title": "t", "keyword": "code"},)");
-    CHECK(test::read(tree, "set.json", with_cases).summary().find("rule-source-unused") ==
-          test::read(tree, "set.json", with_cases).summary().rfind("rule-source-unused"));
-}

@@ -12,8 +12,6 @@
 #include <algorithm>
 #include <utility>
 
-#include <fmt/format.h>
-
 namespace isohydric::rule {
 namespace {
 
@@ -134,24 +132,6 @@ class SetReader {
             };
             std::ranges::move(read_cases(document->json, *rules_, superseded, report_),
                               std::back_inserter(rules_->cases));
-        }
-        report_unused_sources();
-    }
-
-    // Only a reading that has seen the cases too knows that a source is not cited.
-    void report_unused_sources() {
-        detail::Refs refs;
-        for (const detail::Document& document : documents_.all()) {
-            detail::collect_refs(document.json, refs);
-        }
-        for (const detail::CslItem& source : bibliography_) {
-            if (!source.cited_elsewhere && !refs.contains(source.item.id)) {
-                report_.warning("rule-source-unused",
-                                source.item.place,
-                                fmt::format("nothing cites \"{}\"; take it out, or give it the "
-                                            "keyword \"code\" if the program's own sources do",
-                                            source.item.id));
-            }
         }
     }
 

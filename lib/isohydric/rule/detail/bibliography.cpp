@@ -160,8 +160,7 @@ void read_bibliography(const diag::Json& file, std::vector<CslItem>& items, diag
         }
         items.push_back(
             {.item = {.id = std::string(id->text()), .citation = citation, .place = id->place()},
-             .json = &json,
-             .cited_elsewhere = text_of(json, "keyword") == "code"});
+             .json = &json});
     }
 }
 

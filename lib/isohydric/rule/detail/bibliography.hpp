@@ -15,8 +15,6 @@ namespace isohydric::rule::detail {
 struct CslItem {
     BibliographyItem item;
     const diag::Json* json = nullptr;
-    bool cited_elsewhere =
-        false;  ///< its keyword is `code`: cited by sources and tests of the program
 };
 
 /// Adds the items of one bibliography file. An id used twice is reported.

@@ -36,8 +36,6 @@ class Documents {
     /// As `read`, but a file that does not exist is no fault.
     const Document* read_if_present(const std::string& path);
 
-    [[nodiscard]] const std::deque<Document>& all() const { return documents_; }
-
   private:
     const Document* kept(std::string_view path) const;
     const Document* keep(const std::string& path, std::string text);
