@@ -8,6 +8,9 @@ target_compile_options(isohydric_build_flags INTERFACE
     -Wall -Wextra -Wpedantic -Wshadow -Wconversion -Wsign-conversion -Wdouble-promotion
     -Wold-style-cast -Wcast-qual -Wswitch-enum -Wmissing-declarations -Wundef
     $<$<CXX_COMPILER_ID:GNU>:-Wduplicated-cond -Wduplicated-branches -Wlogical-op -Wuseless-cast -Wno-psabi>)
+if(ISOHYDRIC_BUILD_FUZZERS)
+    target_compile_options(isohydric_build_flags INTERFACE -fsanitize=fuzzer-no-link)
+endif()
 if(ISOHYDRIC_SANITIZE)
     target_compile_options(isohydric_build_flags INTERFACE
         -fsanitize=${ISOHYDRIC_SANITIZE} -fno-sanitize-recover=all -fno-omit-frame-pointer)
@@ -33,7 +36,10 @@ function(isohydric_folder name)
         target_link_libraries(isohydric_${name} PRIVATE isohydric_build_flags ${arg_LINKS})
         target_sources(isohydric PRIVATE $<TARGET_OBJECTS:isohydric_${name}>)
         foreach(link IN LISTS arg_LINKS)
-            target_link_libraries(isohydric PRIVATE $<BUILD_INTERFACE:${link}>)
+            get_target_property(kind ${link} TYPE)
+            if(NOT kind STREQUAL "INTERFACE_LIBRARY")  # who links the archive needs no header-only library
+                target_link_libraries(isohydric PRIVATE ${link})
+            endif()
         endforeach()
         set(scope PUBLIC)
     endif()
