@@ -13,7 +13,7 @@ int main() {
         diag::Report report;
         const auto locate = rule::locator_in(diag::make_source("line", line));
         if (const auto syntax = rule::parse_expression(line, locate, report)) {
-            std::cout << rule::testing::tree(*syntax) << '\n';
+            std::cout << rule::testing::tree_of(*syntax) << '\n';
             continue;
         }
         std::cout << "refused";

@@ -9,7 +9,7 @@ namespace {
 std::string tree(const std::string& expression) {
     Text text(expression);
     const std::optional<Syntax> parsed = text.parse();
-    return parsed ? tree(*parsed) : ids(text.report);
+    return parsed ? tree_of(*parsed) : ids(text.report);
 }
 
 }  // namespace

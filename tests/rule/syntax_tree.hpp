@@ -8,13 +8,13 @@
 
 namespace isohydric::rule::testing {
 
-inline std::string tree(const Syntax& node) {
+inline std::string tree_of(const Syntax& node) {
     if (node.children.empty()) {
         return node.kind == NodeKind::name ? written_name(node.path) : node.text;
     }
     std::string inner;
     for (const Syntax& child : node.children) {
-        inner += " " + tree(child);
+        inner += " " + tree_of(child);
     }
     return "(" + node.text + inner + ")";
 }
