@@ -42,7 +42,7 @@ def in_json(path, value):
 
 citations = []
 for folder in ("lib", "cli", "tests"):
-    for path, text in text_files(folder, ".hpp", ".cpp", ".csv", ".py", ".mjs", ".md"):
+    for path, text in text_files(folder, ".hpp", ".cpp", ".csv", ".py", ".mjs"):
         citations += in_text(path, text)
 for folder in ("rules", "tests/published"):
     for path, text in text_files(folder, ".json"):
