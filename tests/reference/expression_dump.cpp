@@ -131,7 +131,9 @@ class RowWriter {
             }
             const auto left = scratch_.value(program_.node(*node.children[0]).value(), row);
             const auto right = scratch_.value(program_.node(*node.children[1]).value(), row);
-            count += left && right && num::compare_at_8_decimals(*left, *right) == 0 ? 1 : 0;
+            if (left && right && num::compare_at_8_decimals(*left, *right) == 0) {
+                ++count;
+            }
         });
         return count;
     }
