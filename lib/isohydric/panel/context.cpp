@@ -98,7 +98,7 @@ diag::Result<double> read_age_a(std::string_view text) {
     constexpr double k_oldest_a = 130;
     constexpr std::string_view k_help =
         "write an age with its unit, such as 15min, 6h, 3d, 5wk, 2mo, 4y";
-    const diag::Result<double> age_a = read_in(text, k_age_units, "a", k_help);
+    diag::Result<double> age_a = read_in(text, k_age_units, "a", k_help);
     if (age_a && !(*age_a >= 0 && *age_a <= k_oldest_a)) {
         return diag::unexpected(
             fmt::format("\"{}\" is not an age between 0 and {} years", text, k_oldest_a));
@@ -110,7 +110,7 @@ diag::Result<double> read_altitude_m(std::string_view text) {
     constexpr double k_lowest_m = -500;
     constexpr double k_highest_m = 9000;
     constexpr std::string_view k_help = "write an altitude in metres (1 ft is 0.3048 m)";
-    const diag::Result<double> altitude_m = read_in(text, k_altitude_units, "m", k_help);
+    diag::Result<double> altitude_m = read_in(text, k_altitude_units, "m", k_help);
     if (altitude_m && !(*altitude_m >= k_lowest_m && *altitude_m <= k_highest_m)) {
         return diag::unexpected(fmt::format(
             "\"{}\" is not an altitude between {} and {} metres", text, k_lowest_m, k_highest_m));

@@ -185,20 +185,10 @@ diag::Result<units::Unit> parse_written(std::string_view written) {
     return units::parse_unit(*code);
 }
 
-diag::Unexpected<std::string> qualifier_needed(const WrittenValue& value,
-                                               const std::vector<CustomaryUnit>& readings) {
-    std::vector<std::string> shown;
-    for (const CustomaryUnit& unit : readings) {
-        shown.push_back(describe_reading(value, unit));
-    }
-    return diag::unexpected(
-        fmt::format("{} may be {}; say which", value.name, diag::join(shown, ", or ")));
-}
-
 /// The readings of a bare number, one for each different value.
 struct BareReadings {
-    std::vector<const CustomaryUnit*> plausible;
-    std::vector<const CustomaryUnit*> implausible;
+    std::vector<CustomaryUnit> plausible;
+    std::vector<CustomaryUnit> implausible;
 };
 
 BareReadings bare_readings(const WrittenValue& value) {
@@ -213,19 +203,21 @@ BareReadings bare_readings(const WrittenValue& value) {
         seen.push_back(canonical);
         auto& list =
             value.info.plausible.contain(canonical) ? readings.plausible : readings.implausible;
-        list.push_back(unit);
+        list.push_back(*unit);
     }
     return readings;
 }
 
+/// Each of the units as a reading of the value.
 std::string list_readings(const WrittenValue& value,
-                          const std::vector<const CustomaryUnit*>& units,
+                          const std::vector<CustomaryUnit>& units,
                           std::string_view separator) {
-    std::vector<std::string> shown;
-    for (const CustomaryUnit* unit : units) {
-        shown.push_back(describe_reading(value, *unit));
+    std::string shown;
+    for (const CustomaryUnit& unit : units) {
+        shown += shown.empty() ? "" : separator;
+        shown += describe_reading(value, unit);
     }
-    return diag::join(shown, separator);
+    return shown;
 }
 
 std::string with_unit(std::string_view digits, std::string_view text) {
@@ -266,7 +258,8 @@ diag::Result<CustomaryUnit> unit_as_written(const WrittenValue& value, std::stri
     const bool ambiguous =
         readings.size() > 1 && qualified.qualifier.empty() && !readings.front().qualifier.empty();
     if (ambiguous) {
-        return qualifier_needed(value, readings);
+        return diag::unexpected(fmt::format(
+            "{} may be {}; say which", value.name, list_readings(value, readings, ", or ")));
     }
     if (!readings.empty()) {
         return readings.front();
@@ -303,10 +296,10 @@ diag::Result<CustomaryUnit> unit_of_bare(const WrittenValue& value) {
         return unit.bare || unit.ucum == value.info.unit.code();
     };
     if (different == 1) {
-        return *(readings.plausible.empty() ? readings.implausible : readings.plausible).front();
+        return (readings.plausible.empty() ? readings.implausible : readings.plausible).front();
     }
-    if (readings.plausible.size() == 1 && needs_no_saying(*readings.plausible.front())) {
-        return *readings.plausible.front();
+    if (readings.plausible.size() == 1 && needs_no_saying(readings.plausible.front())) {
+        return readings.plausible.front();
     }
     if (readings.plausible.empty()) {
         return diag::unexpected(
@@ -333,7 +326,7 @@ std::optional<CustomaryUnit> unit_needless(const AnalyteInfo& info, std::string_
 }
 
 std::string describe_reading(const WrittenValue& value, const CustomaryUnit& unit) {
-    const std::string written = with_unit(value.number.digits, unit.spoken());
+    std::string written = with_unit(value.number.digits, unit.spoken());
     if (unit.factor == 1 && unit.offset == 0) {
         return written;
     }
