@@ -1,6 +1,7 @@
 // Reads one rule set from a folder and prints what the reader has to say, for tests that compare the reader with
 // something outside of this program: `read_rules [--canonical] <folder> <set path>`.
 #include "isohydric/diag/render.hpp"
+#include "isohydric/engine/models.hpp"
 #include "isohydric/rule/rule_set.hpp"
 
 #include <fstream>
@@ -35,8 +36,11 @@ int main(int argc, char** argv) {
         return 2;
     }
     diag::Report report;
-    const auto rules = rule::read_rule_set(
-        argv[argc - 1], files_below(argv[argc - 2]), {}, report, {.with_cases = true});
+    const auto rules = rule::read_rule_set(argv[argc - 1],
+                                           files_below(argv[argc - 2]),
+                                           engine::model_signatures(),
+                                           report,
+                                           {.with_cases = true});
     std::cerr << diag::render(report);
     if (rules == nullptr) {
         return 1;

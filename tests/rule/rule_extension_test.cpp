@@ -39,23 +39,22 @@ test::RuleTree with_choice(std::string conventions,
 TEST_CASE("set: one that extends another adds, replaces and removes") {
     test::RuleTree tree = laboratory(
         R"("files": ["more.json"], "replace": ["ours.json"], "remove": ["hasNa"], "approved": {"role": "head", "date": "2026-11-30"})");
-    tree["more.json"] = test::with_heads(R"({"conditions": [{"id": "hasK", "when": "K.exists()", $H
-}]
-})");
+    tree["more.json"] =
+        test::with_heads(R"json({"conditions": [{"id": "hasK", "when": "K.exists()", $H}]})json");
     tree["ours.json"] = test::with_heads(
         R"({"intervals": [{"id": "gap-limits", "of": "gap", "unit": "mmol/L", "low": 3, "high": 11, $H}]})");
-const test::Reading reading = test::read(tree, "lab.json");
-INFO(diag::render(reading.report));
-REQUIRE(reading.rules != nullptr);
-CHECK(reading.rules->id == "lab");
-CHECK(reading.rules->version == "7");
-CHECK(reading.rules->approved_role == "head");
-CHECK(reading.rules->approved_date == "2026-11-30");
-CHECK_FALSE(reading.rules->find_condition("hasNa").has_value());
-CHECK(reading.rules->find_condition("hasK").has_value());
-REQUIRE(reading.rules->intervals.size() == 1);
-CHECK(reading.rules->intervals[0].high == 11.0);
-CHECK(test::read(tree).rules->intervals[0].high == 12.0);
+    const test::Reading reading = test::read(tree, "lab.json");
+    INFO(diag::render(reading.report));
+    REQUIRE(reading.rules != nullptr);
+    CHECK(reading.rules->id == "lab");
+    CHECK(reading.rules->version == "7");
+    CHECK(reading.rules->approved_role == "head");
+    CHECK(reading.rules->approved_date == "2026-11-30");
+    CHECK_FALSE(reading.rules->find_condition("hasNa").has_value());
+    CHECK(reading.rules->find_condition("hasK").has_value());
+    REQUIRE(reading.rules->intervals.size() == 1);
+    CHECK(reading.rules->intervals[0].high == 11.0);
+    CHECK(test::read(tree).rules->intervals[0].high == 12.0);
 }
 
 TEST_CASE("set: what is replaced or removed must be in the parent") {
@@ -72,6 +71,10 @@ TEST_CASE("set: what is replaced or removed must be in the parent") {
     tree["ours.json"] = test::with_heads(
         R"({"quantities": [{"id": "hasNa", "internal": true, "unit": "1", "formula": "1", $H}]})");
     CHECK(test::read(tree, "lab.json").has("rule-kind"));
+    tree["ours.json"] =
+        test::with_heads("{\n \"conditions\": [{\"id\": \"hasNa\", \"when\": \"true\", $H},\n"
+                         " {\"id\": \"hasNa\", \"when\": \"false\", $H}]}");
+    CHECK(test::read(tree, "lab.json").summary() == "ours.json:3:9 rule-id-twice\n");
     tree = test::base_tree();
     tree["set.json"].replace(
         tree["set.json"].find("\"remove\": []"), 12, "\"remove\": [@@\"gap\"]");
@@ -84,8 +87,9 @@ TEST_CASE("set: what hangs on a removed entry is told of") {
 
 TEST_CASE("set: circles of sets and files that are missing or named twice are told of") {
     test::RuleTree tree = laboratory("");
-    tree["set.json"].replace(
-        tree["set.json"].find("\"extends\": null"), 15, "\"extends\": @@\"lab.json\"");
+    std::string& set = tree["set.json"];
+    set.replace(set.find("\"extends\": null"), 15, "\"extends\": \"lab.json\"");
+    tree["lab.json"].insert(tree["lab.json"].find("\"set.json\""), "@@");
     test::check_complaint(tree, "rule-set-cycle");
     tree = test::base_tree();
     tree["set.json"].replace(tree["set.json"].find("null"), 4, "@@\"set.json\"");

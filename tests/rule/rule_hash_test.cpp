@@ -5,8 +5,6 @@
 
 #include <doctest/doctest.h>
 
-#include <algorithm>
-
 #include "rule/rule_tree.hpp"
 
 using namespace isohydric;
@@ -143,7 +141,23 @@ TEST_CASE("hash: every number, word, choice and cited source changes it") {
     changed("base.json", "Na - Cl - TCO2", "Na - Cl - (TCO2)");
     changed("base.json", "common-practice\"", "known2001\", \"at\": \"p. 1\"");
     changed("analytes.json", "\"decimals\": 2", "\"decimals\": 3");
-    const auto numbers = std::ranges::count_if(test::base_tree()["base.json"],
-                                               [](char c) { return c >= '0' && c <= '9'; });
-    CHECK(numbers > 0);
+}
+
+TEST_CASE("hash: each JSON number of the files changes it") {
+    const std::string hash = hash_of(test::base_tree());
+    const std::string text = test::base_tree()["base.json"];
+    int numbers = 0;
+    for (std::size_t at = text.find("\": "); at != std::string::npos;
+         at = text.find("\": ", at + 1)) {
+        const std::size_t digit = at + 3;
+        if (text[digit] < '0' || text[digit] > '8') {
+            continue;
+        }
+        CAPTURE(digit);
+        test::RuleTree tree = test::base_tree();
+        ++tree["base.json"][digit];
+        CHECK(hash_of(tree) != hash);
+        ++numbers;
+    }
+    CHECK(numbers == 4);  // two counts of decimals, a low and a high limit
 }

@@ -7,6 +7,7 @@
 #include <doctest/doctest.h>
 
 #include "rule/rule_tree.hpp"
+#include <fmt/format.h>
 
 using namespace isohydric;
 using test::check_complaint_in_rules;
@@ -151,6 +152,21 @@ TEST_CASE("rule set: what hangs on itself is told of with the way around") {
       {"id": "a", "when": "b", $H}, {"id": "b", "when": "c", $H}, {"id": "c", "when": "b", $H}]})"));
     REQUIRE(reading.report.diagnostics().size() == 1);
     CHECK(reading.report.diagnostics()[0].message.find("b -> c -> b") != std::string::npos);
+}
+
+TEST_CASE("rule set: a line of a thousand references is too deep, and no more is followed") {
+    // The search begins with the first entry, so the end of the line comes first.
+    const auto line_of = [](int length) {
+        std::string rules = R"({"conditions": [)";
+        for (int i = length; i > 0; --i) {
+            rules += fmt::format(R"({{"id": "c{}", "when": "c{}", $H}}, )", i, i - 1);
+        }
+        return test::read(test::tree_with(rules + R"({"id": "c0", "when": "true", $H}]})"));
+    };
+    CHECK(line_of(998).rules != nullptr);
+    const test::Reading deep = line_of(1500);
+    CHECK(deep.has("rule-too-deep"));
+    CHECK_FALSE(deep.has("rule-cycle"));
 }
 
 TEST_CASE("rule set: dependencies are direct and counted once") {

@@ -25,7 +25,7 @@ constexpr std::string_view k_set = R"({
   "conventions": {}, "replace": [], "remove": [], "approved": {"role": "", "date": ""}
 })";
 
-constexpr std::string_view k_base = R"({
+constexpr std::string_view k_base = R"json({
   "disorders": [
     {"id": "metabolic-acidosis", "label": "metabolic acidosis", "main": true, "approaches": ["bicarbonate"], $H},
     {"id": "metabolic-alkalosis", "label": "metabolic alkalosis", "main": true, "approaches": ["bicarbonate"], $H},
@@ -35,15 +35,13 @@ constexpr std::string_view k_base = R"({
     {"id": "gap", "label": "anion gap", "unit": "mmol/L", "decimals": 1, "formula": "Na - Cl - TCO2", $H},
     {"id": "pressure38", "label": "pressure", "unit": "mm[Hg]", "decimals": 0, "formula": "38 'mm[Hg]'", $H}
   ],
-  "conditions": [{"id": "hasNa", "when": "Na.exists()",
-                           $H
-}],
+  "conditions": [{"id": "hasNa", "when": "Na.exists()", $H}],
   "findings": [
     {"id": "raised-gap", "approach": "bicarbonate", "label": "raised gap", "when": "gap > limits.gap.high",
      "states": "gap {gap}", "asserts": ["lactic-acidosis"], $H}
   ],
   "intervals": [{"id": "gap-limits", "of": "gap", "unit": "mmol/L", "low": 4, "high": 12, $H}]
-})";
+})json";
 
 std::string read_file(const std::string& path) {
     std::ifstream file(path, std::ios::binary);

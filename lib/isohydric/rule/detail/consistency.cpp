@@ -13,6 +13,9 @@
 namespace isohydric::rule::detail {
 namespace {
 
+// Whoever follows the references, here or later, may do so by recursion.
+constexpr std::size_t k_deepest = 1000;
+
 /// Looks for circles depth first; `path_` is the way from where the search began.
 class CycleFinder {
   public:
@@ -46,11 +49,24 @@ class CycleFinder {
         }
         *state = State::open;
         path_.push_back(symbol);
-        for (const Symbol& needed : dependencies_of(rules_, symbol)) {
-            visit(needed);
+        if (path_.size() == k_deepest) {
+            report_.error("rule-too-deep",
+                          head_of(symbol).place,
+                          fmt::format("more than {} entries hang on each other in one line; name "
+                                      "less, or write some in one expression",
+                                      k_deepest));
+        }
+        if (path_.size() < k_deepest) {
+            visit_needed(symbol);
         }
         path_.pop_back();
         *state = State::done;
+    }
+
+    void visit_needed(const Symbol& symbol) {
+        for (const Symbol& needed : dependencies_of(rules_, symbol)) {
+            visit(needed);
+        }
     }
 
     void complain(const Symbol& symbol) {

@@ -6,6 +6,7 @@
 
 #include <algorithm>
 #include <array>
+#include <set>
 #include <utility>
 
 #include <fmt/format.h>
@@ -37,9 +38,9 @@ std::string choice_of(const diag::Json& convention) {
 
 /// Who has an id. Alternatives of one choice share theirs.
 struct Owner {
-    diag::Place place;
+    diag::Place place;  ///< where it was first used
     std::string choice;
-    std::string convention;
+    std::set<std::string, std::less<>> conventions;  ///< alternatives that have it
 };
 
 /// The convention whose members are being declared; none for entries that stand by themselves.
@@ -84,12 +85,11 @@ class Declarer {
                 return false;
             }
         }
-        const auto [found, fresh] =
-            owners_.try_emplace(id, Owner{place, membership.choice, membership.convention});
-        const Owner& owner = found->second;
-        const bool sibling = !membership.choice.empty() && owner.choice == membership.choice &&
-                             owner.convention != membership.convention;
-        if (fresh || sibling) {
+        const auto [found, fresh] = owners_.try_emplace(id, Owner{place, membership.choice, {}});
+        Owner& owner = found->second;
+        const bool new_to_alternative = owner.conventions.insert(membership.convention).second;
+        const bool sibling = !membership.choice.empty() && owner.choice == membership.choice;
+        if (fresh || (sibling && new_to_alternative)) {
             return true;
         }
         report_

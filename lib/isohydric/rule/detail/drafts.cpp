@@ -86,10 +86,9 @@ class DraftReader {
         for (const Written& id : set.remove) {
             remove(id);
         }
-        const std::vector<Draft> parent = drafts_.entries;
         for (const Written& path : set.replace) {
             for (Draft& draft : read_file(path, set)) {
-                replace(std::move(draft), parent);
+                replace(std::move(draft));
             }
         }
         for (const Written& path : set.files) {
@@ -120,17 +119,17 @@ class DraftReader {
     void remove(const Written& id) {
         const auto found = std::ranges::find(drafts_.entries, id.text, &Draft::id);
         if (found == drafts_.entries.end()) {
-            report_unknown(id, drafts_.entries, "removed");
+            report_unknown(id, "removed");
             return;
         }
         drafts_.entries.erase(found);
         drafts_.superseded[id.text] = level_;
     }
 
-    void replace(Draft draft, const std::vector<Draft>& parent) {
+    void replace(Draft draft) {
         const auto found = std::ranges::find(drafts_.entries, draft.id, &Draft::id);
         if (found == drafts_.entries.end()) {
-            report_unknown({draft.id, draft.id_place()}, parent, "replaced");
+            report_unknown({draft.id, draft.id_place()}, "replaced");
             return;
         }
         if (found->kind != draft.kind) {
@@ -145,14 +144,20 @@ class DraftReader {
                 .notes.push_back({"the entry of the parent is here", found->id_place()});
             return;
         }
-        drafts_.superseded[draft.id] = level_;
+        if (const auto [at, fresh] = drafts_.superseded.try_emplace(draft.id, level_);
+            !fresh && std::exchange(at->second, level_) == level_) {
+            report_
+                .error("rule-id-twice",
+                       draft.id_place(),
+                       fmt::format("\"{}\" is replaced twice by this set; take one out", draft.id))
+                .notes.push_back({"the first is here", found->id_place()});
+        }
         *found = std::move(draft);
     }
 
-    void
-    report_unknown(const Written& id, const std::vector<Draft>& parent, std::string_view done_to) {
+    void report_unknown(const Written& id, std::string_view done_to) {
         std::vector<std::string> known;
-        for (const Draft& draft : parent) {
+        for (const Draft& draft : drafts_.entries) {
             known.push_back(draft.id);
         }
         report_.error("rule-id-unknown",
