@@ -2,6 +2,7 @@
 #include "isohydric/engine/explain.hpp"
 #include "isohydric/interpret/detail/assemble.hpp"
 #include "isohydric/interpret/words.hpp"
+#include "isohydric/rule/sentence.hpp"
 
 #include <algorithm>
 
@@ -25,6 +26,17 @@ std::string with_response(const ExplanationResult& explanation) {
     return text;
 }
 
+/// The first explanation with what its statement says of the specimen; without a disorder, the statement tells why.
+std::string as_reading(const ExplanationResult& explanation) {
+    const std::string& statement = explanation.statement;
+    if (explanation.disorders.empty()) {
+        return statement.starts_with("no ") ? statement : "no disorder: " + statement;
+    }
+    const std::size_t reservation = statement.find(';');
+    return with_response(explanation) +
+           (reservation == std::string::npos ? std::string() : statement.substr(reservation));
+}
+
 std::string compensation_words(const CompensationResult& band) {
     const double limit = band.state == BandState::above ? band.expected_high : band.expected_low;
     return fmt::format("{} {} {}, {} {} to {} ({})",
@@ -45,7 +57,7 @@ void add_reading(const Interpretation& so_far, std::vector<std::string>& said) {
         return;
     }
     const ExplanationResult& first = so_far.explanations.front();
-    said.push_back("Reading: " + with_response(first) +
+    said.push_back("Reading: " + as_reading(first) +
                    (first.unchecked
                         ? " [rests on a value not checked against its source: " + first.id + "]."
                         : "."));
@@ -61,30 +73,124 @@ void add_reading(const Interpretation& so_far, std::vector<std::string>& said) {
     }
 }
 
-void add_findings(const Interpretation& so_far, std::vector<std::string>& said) {
-    for (const FindingResult& finding : so_far.findings) {
-        if (finding.state == Truth::yes && !finding.statement.empty()) {
-            said.push_back(
-                capitalised(finding.statement) +
-                (finding.shipped_limit ? " (shipped limit, not your laboratory's)." : "."));
+bool contains(const std::vector<std::string>& ids, const std::string& id) {
+    return std::find(ids.begin(), ids.end(), id) != ids.end();
+}
+
+/// The values that a sentence says; limits are not news.
+std::vector<std::string> numbers_said(const std::string& sentence) {
+    std::vector<std::string> names;
+    for (const rule::SentencePlace& place : rule::find_places(sentence).places) {
+        if (!place.name.starts_with("limits.")) {
+            names.emplace_back(place.name);
         }
+    }
+    return names;
+}
+
+/// Tells which of the findings that hold change what a reader thinks after the reading itself.
+class Selection {
+  public:
+    Selection(const Interpretation& so_far, const rule::RuleSet& rules)
+        : so_far_(so_far), rules_(rules) {
+        for (std::size_t i = 0; i < rules.criticals.size(); ++i) {
+            const bool said = std::any_of(
+                so_far.critical.begin(), so_far.critical.end(), [&](const CriticalValue& value) {
+                    return value.id == rules.criticals[i].head.id;
+                });
+            if (said) {
+                said_.push_back(numbers_said(rules.criticals[i].states));
+            }
+        }
+        for (std::size_t i = 0; i < so_far.findings.size(); ++i) {
+            if (so_far.findings[i].state == Truth::yes && !so_far.findings[i].asserts.empty()) {
+                said_.push_back(numbers_said(rules.findings[i].states));
+            }
+        }
+    }
+
+    /// Results stand in the order of the rules.
+    [[nodiscard]] bool tells(std::size_t index) const {
+        const FindingResult& finding = so_far_.findings[index];
+        if (finding.state != Truth::yes || finding.statement.empty()) {
+            return false;
+        }
+        if (so_far_.explanations.empty()) {
+            return true;
+        }
+        return finding.asserts.empty() ? adds_numbers(rules_.findings[index])
+                                       : differs_from_reading(finding);
+    }
+
+  private:
+    /// A row of a table names the pattern that the reading explains; a sentence about numbers that a critical value or an
+    /// asserting finding has given already repeats it.
+    [[nodiscard]] bool adds_numbers(const rule::Finding& finding) const {
+        if (!finding.table.empty()) {
+            return false;
+        }
+        const std::vector<std::string> names = numbers_said(finding.states);
+        return names.empty() || std::none_of(said_.begin(), said_.end(), [&](const auto& other) {
+                   return std::all_of(names.begin(), names.end(), [&](const std::string& name) {
+                       return contains(other, name);
+                   });
+               });
+    }
+
+    /// Whether a finding asserts a main disorder that the reading leaves out, or another approach anything that it does.
+    [[nodiscard]] bool differs_from_reading(const FindingResult& finding) const {
+        const ExplanationResult& reading = so_far_.explanations.front();
+        const std::optional<std::uint32_t> entry = rules_.find_explanation(reading.id);
+        const bool same_approach =
+            entry && rules_.explanations[*entry].approach == finding.approach;
+        return std::any_of(
+            finding.asserts.begin(), finding.asserts.end(), [&](const std::string& id) {
+                const std::optional<std::uint32_t> disorder = rules_.find_disorder(id);
+                const bool main = disorder && rules_.disorders[*disorder].main;
+                return (main || !same_approach) && !contains(reading.disorders, id);
+            });
+    }
+
+    const Interpretation& so_far_;
+    const rule::RuleSet& rules_;
+    std::vector<std::vector<std::string>> said_;
+};
+
+std::string ended(std::string statement) {
+    return statement.ends_with('.') ? statement : statement + ".";
+}
+
+void add_findings(const Interpretation& so_far,
+                  const rule::RuleSet& rules,
+                  std::vector<std::string>& said) {
+    const Selection selection(so_far, rules);
+    bool shipped = false;
+    for (std::size_t i = 0; i < so_far.findings.size(); ++i) {
+        const FindingResult& finding = so_far.findings[i];
+        shipped = shipped || (finding.state == Truth::yes && finding.shipped_limit);
+        if (selection.tells(i)) {
+            said.push_back(ended(capitalised(finding.statement)));
+        }
+    }
+    if (shipped) {
+        said.emplace_back("Some of this rests on shipped limits, not your laboratory's.");
     }
 }
 
 }  // namespace
 
-std::vector<std::string> sentences(const Interpretation& so_far, const Evaluation&) {
+std::vector<std::string> sentences(const Interpretation& so_far, const Evaluation& evaluation) {
     std::vector<std::string> said;
     if (!so_far.interpretable) {
         for (const CheckResult& check : so_far.checks) {
             if (check.outcome == Outcome::stop) {
-                said.push_back("Not interpretable: " + check.detail);
+                said.push_back("Not interpretable: " + ended(check.detail));
             }
         }
     } else {
         add_reading(so_far, said);
     }
-    add_findings(so_far, said);
+    add_findings(so_far, evaluation.rules(), said);
     return said;
 }
 

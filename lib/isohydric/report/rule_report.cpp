@@ -1,12 +1,13 @@
 #include "isohydric/report/rule_report.hpp"
 
 #include "isohydric/diag/render.hpp"
+#include "isohydric/interpret/words.hpp"
 #include "isohydric/report/caution.hpp"
 #include "isohydric/report/detail/text_layout.hpp"
 #include "isohydric/rule/plain_text.hpp"
 
 #include <algorithm>
-#include <vector>
+#include <set>
 
 #include <fmt/format.h>
 
@@ -25,16 +26,24 @@ struct Line {
     std::string says;
 };
 
+std::string hyphened(std::string_view kind) {
+    std::string name(kind);
+    std::replace(name.begin(), name.end(), ' ', '-');
+    return name;
+}
+
+/// Name, limits and mid-value; for whom they hold is told by the id.
 std::string limits_text(const rule::Interval& interval, const RuleSet& rules) {
-    const auto number = [](const std::optional<double>& value) {
-        return value ? fmt::format("{:g}", *value) : std::string("-");
-    };
-    return fmt::format("{} {} to {}, mid {} {}",
-                       rules.interval_names[interval.name],
-                       number(interval.low),
-                       number(interval.high),
-                       number(interval.mid),
-                       rules.interval_units[interval.name].code());
+    const std::string unit = interpret::unit_words(rules.interval_units[interval.name].code());
+    std::string text = rules.interval_names[interval.name];
+    if (interval.low && interval.high) {
+        text += fmt::format(" {:g} to {:g}", *interval.low, *interval.high);
+    } else if (interval.low || interval.high) {
+        text += interval.low ? fmt::format(" from {:g}", *interval.low)
+                             : fmt::format(" up to {:g}", *interval.high);
+    }
+    text += unit.empty() ? "" : " " + unit;
+    return text + (interval.mid ? fmt::format(", mid-value {:g}", *interval.mid) : std::string());
 }
 
 Line line_of(const RuleSet& rules, const rule::EntryRef& entry) {
@@ -79,22 +88,35 @@ class Page {
 
     std::string write(const rule::EntryRef& entry) {
         const Line line = line_of(rules_, entry);
-        out_.item("", caution());
-        out_.blank();
         out_.item("", fmt::format("{} {}", rule::describe(entry.kind), line.head->id));
         out_.item("  says      ", line.says);
         details(entry);
         head(*line.head);
-        out_.blank();
-        out_.item("", caution());
-        return out_.take();
+        return with_caution(out_.take(), k_width);
+    }
+
+    /// All alternatives of a choice; empty if there is no such choice.
+    std::string write_choice(const std::string& choice) {
+        const bool known =
+            std::any_of(rules_.conventions.begin(),
+                        rules_.conventions.end(),
+                        [&](const auto& convention) { return convention.choice == choice; });
+        if (!known) {
+            return {};
+        }
+        out_.item("", "choice " + choice);
+        alternatives(choice, true);
+        how_to_choose(choice);
+        return with_caution(out_.take(), k_width);
     }
 
   private:
     void details(const rule::EntryRef& entry);
     void quantity(const rule::Quantity& quantity);
+    void finding(const rule::Finding& finding);
     void convention(const rule::Convention& convention);
-    void alternatives(const std::string& choice);
+    void alternatives(const std::string& choice, bool with_reasons);
+    void how_to_choose(const std::string& choice);
     void head(const rule::EntryHead& head);
 
     void when(const rule::ExpressionPtr& expression) {
@@ -115,7 +137,7 @@ void Page::details(const rule::EntryRef& entry) {
     case EntryKind::condition:
         return when(rules_.conditions[i].when);
     case EntryKind::finding:
-        return when(rules_.findings[i].when);
+        return finding(rules_.findings[i]);
     case EntryKind::check:
         return when(rules_.checks[i].when);
     case EntryKind::critical:
@@ -154,7 +176,10 @@ void Page::details(const rule::EntryRef& entry) {
 
 void Page::quantity(const rule::Quantity& quantity) {
     out_.item("  unit      ",
-              fmt::format("{}, {} decimals", quantity.unit.code(), quantity.decimals));
+              fmt::format("{}, {} decimal{}",
+                          quantity.unit.code() == "1" ? "none" : quantity.unit.code(),
+                          quantity.decimals,
+                          quantity.decimals == 1 ? "" : "s"));
     if (quantity.model) {
         const rule::ModelSignature& model = rules_.models[quantity.model->model];
         out_.item("  model     ", model.id);
@@ -173,25 +198,54 @@ void Page::quantity(const rule::Quantity& quantity) {
     const auto owner = rules_.find(quantity.convention, EntryKind::convention);
     if (owner) {
         out_.item("  belongs   ", "to convention " + quantity.convention);
-        alternatives(rules_.conventions[*owner].choice);
+        alternatives(rules_.conventions[*owner].choice, false);
+        how_to_choose(rules_.conventions[*owner].choice);
+    }
+}
+
+void Page::finding(const rule::Finding& finding) {
+    when(finding.when);
+    std::vector<std::string> asserted;
+    for (const std::uint32_t disorder : finding.asserts) {
+        asserted.push_back(rules_.disorders[disorder].label);
+    }
+    if (!asserted.empty()) {
+        out_.item("  asserts   ", listed(asserted));
+    }
+    for (const std::uint32_t other : finding.unless) {
+        out_.item("  unless    ", rules_.findings[other].head.id);
+    }
+    if (!finding.consider.empty()) {
+        out_.item("  consider  ", listed(finding.consider, "; "));
     }
 }
 
 void Page::convention(const rule::Convention& convention) {
-    out_.item("  why       ", convention.why);
-    for (const std::string& id : convention.defines) {
-        out_.item("  defines   ", id);
-    }
-    alternatives(convention.choice);
+    out_.item("  defines   ", listed(convention.defines));
+    alternatives(convention.choice, true);
+    how_to_choose(convention.choice);
 }
 
-void Page::alternatives(const std::string& choice) {
-    for (const rule::Convention& other : rules_.conventions) {
-        if (other.choice == choice) {
-            out_.item(other.chosen ? "  in force  " : "  or        ",
-                      fmt::format("{}: {}. {}", other.head.id, other.title, other.why));
+/// The alternative in force with its reason, then the others, with theirs if asked for.
+void Page::alternatives(const std::string& choice, bool with_reasons) {
+    for (const bool chosen : {true, false}) {
+        for (const rule::Convention& other : rules_.conventions) {
+            if (other.choice == choice && other.chosen == chosen) {
+                const bool reason = (chosen || with_reasons) && !other.why.empty();
+                out_.item(chosen ? "  in force  " : "  or        ",
+                          fmt::format("{}: {}{}",
+                                      other.head.id,
+                                      other.title,
+                                      reason ? " - " + other.why : std::string()));
+            }
         }
     }
+}
+
+void Page::how_to_choose(const std::string& choice) {
+    out_.item("  choose    ",
+              fmt::format("in a set that extends this one: \"conventions\": {{\"{}\": \"<id>\"}}",
+                          choice));
 }
 
 void Page::head(const rule::EntryHead& head) {
@@ -214,31 +268,49 @@ void Page::head(const rule::EntryHead& head) {
 
 std::string list_rules(const RuleSet& rules, std::string_view kind) {
     TextLayout out(k_width);
-    out.item("", caution());
-    out.blank();
-    std::vector<std::vector<std::string>> rows;
-    for (const auto& [id, entry] : rules.by_id) {
-        if (kind.empty() || rule::describe(entry.kind) == kind) {
-            const Line line = line_of(rules, entry);
-            rows.push_back({std::string(rule::describe(entry.kind)),
-                            id,
-                            line.head->reviewed,
-                            line.head->unchecked() ? "unchecked" : "",
-                            line.says});
+    out.item("", fmt::format("{} {}: {}", rules.id, rules.version, rules.title));
+    for (const std::string& name : kind_names()) {
+        TextLayout::Rows rows;
+        for (const auto& [id, entry] : rules.by_id) {
+            if (hyphened(rule::describe(entry.kind)) == name) {
+                const Line line = line_of(rules, entry);
+                rows.push_back({id, line.says + (line.head->unchecked() ? " (unchecked)" : "")});
+            }
+        }
+        if (!rows.empty() && (kind.empty() || kind == name)) {
+            out.heading(fmt::format("{} ({})", name, rows.size()));
+            out.table(rows, "  ");
         }
     }
-    std::stable_sort(rows.begin(), rows.end(), [](const auto& a, const auto& b) {
-        return a.front() < b.front();
-    });
-    out.table(rows, "");
-    out.blank();
-    out.item("", caution());
-    return out.take();
+    return with_caution(out.take(), k_width);
+}
+
+std::vector<std::string> kind_names() {
+    std::vector<std::string> names;
+    for (auto kind = EntryKind::quantity; kind <= EntryKind::convention;
+         kind = static_cast<EntryKind>(static_cast<int>(kind) + 1)) {
+        names.push_back(hyphened(rule::describe(kind)));
+    }
+    return names;
 }
 
 std::optional<std::string> show_rule(const RuleSet& rules, std::string_view id) {
-    const std::optional<rule::EntryRef> entry = rules.find(id);
-    return entry ? std::optional<std::string>(Page(rules).write(*entry)) : std::nullopt;
+    if (const std::optional<rule::EntryRef> entry = rules.find(id)) {
+        return Page(rules).write(*entry);
+    }
+    std::string choice = Page(rules).write_choice(std::string(id));
+    return choice.empty() ? std::nullopt : std::optional<std::string>(std::move(choice));
+}
+
+std::vector<std::string> names_to_show(const RuleSet& rules) {
+    std::set<std::string> names;
+    for (const auto& entry : rules.by_id) {
+        names.insert(entry.first);
+    }
+    for (const rule::Convention& convention : rules.conventions) {
+        names.insert(convention.choice);
+    }
+    return {names.begin(), names.end()};
 }
 
 }  // namespace isohydric::report

@@ -1,11 +1,12 @@
 #include "isohydric/report/text_report.hpp"
 
 #include "isohydric/engine/explain.hpp"
-#include "isohydric/interpret/words.hpp"
 #include "isohydric/report/caution.hpp"
 #include "isohydric/report/detail/text_layout.hpp"
+#include "isohydric/report/detail/value_tables.hpp"
 
 #include <algorithm>
+#include <set>
 
 #include <fmt/format.h>
 
@@ -16,6 +17,8 @@ namespace {
 using namespace isohydric::
     interpret;  // NOLINT(google-build-using-namespace): the results that this file prints
 
+constexpr std::size_t k_short_hash = 12;
+
 /// Writes one interpretation, section by section.
 class TextWriter {
   public:
@@ -23,10 +26,11 @@ class TextWriter {
         : of_(of), full_(options.full), out_(options.width) {}
 
     std::string write() {
-        out_.item("", caution());
         context();
+        rule_set();
         critical();
-        panel();
+        write_panel(of_, full_, out_);
+        write_calculated(of_, full_, out_);
         trust();
         reading();
         reasons();
@@ -34,15 +38,13 @@ class TextWriter {
             everything();
         }
         closing();
-        out_.blank();
-        out_.item("", caution());
         return out_.take();
     }
 
   private:
     void context();
+    void rule_set();
     void critical();
-    void panel();
     void trust();
     void reading();
     void reasons();
@@ -52,6 +54,9 @@ class TextWriter {
     void everything();
     void closing();
 
+    [[nodiscard]] bool supports_reading(const FindingResult& finding) const;
+    [[nodiscard]] std::vector<std::string> labels(const std::vector<std::string>& analytes) const;
+
     [[nodiscard]] const rule::RuleSet& rules() const { return of_.program->rules(); }
 
     [[nodiscard]] std::string cited(const std::vector<rule::Citation>& sources) const;
@@ -60,38 +65,8 @@ class TextWriter {
     bool full_;
     TextLayout out_;
     std::size_t reason_number_ = 0;
+    std::set<std::string> told_;  ///< lines of reasons that a first screen need not repeat
 };
-
-std::string
-range_text(const std::optional<double>& low, const std::optional<double>& high, int decimals) {
-    if (low && high) {
-        return engine::printed(*low, decimals) + " to " + engine::printed(*high, decimals);
-    }
-    if (low) {
-        return "from " + engine::printed(*low, decimals);
-    }
-    return high ? "up to " + engine::printed(*high, decimals) : std::string();
-}
-
-/// A value with as many digits as make "low" or "high" look true beside its limit.
-std::string value_text(double value,
-                       int decimals,
-                       const std::optional<double>& low,
-                       const std::optional<double>& high) {
-    if (low && value < *low) {
-        return engine::printed(value, decimals, low);
-    }
-    return high && value > *high ? engine::printed(value, decimals, high)
-                                 : engine::printed(value, decimals);
-}
-
-std::string_view
-side(double value, const std::optional<double>& low, const std::optional<double>& high) {
-    if (low && value < *low) {
-        return "low";
-    }
-    return high && value > *high ? "high" : "";
-}
 
 std::string TextWriter::cited(const std::vector<rule::Citation>& sources) const {
     std::string text;
@@ -101,46 +76,71 @@ std::string TextWriter::cited(const std::vector<rule::Citation>& sources) const 
             text += "common practice";
         } else {
             text += full_ ? std::string(rules().citation(source.ref)) : source.ref;
-            text += source.at.empty() ? "" : ", " + source.at;
+            text += full_ && !source.at.empty() ? ", " + source.at : "";
         }
         text += source.checked ? "" : " (unchecked)";
     }
     return text;
 }
 
+std::string age_text(double age_a) {
+    constexpr double k_days_a = 365.25;
+    constexpr double k_short_a = 2.0 / 12;
+    return age_a < k_short_a ? fmt::format("{} days old", engine::printed(age_a * k_days_a, 0))
+                             : fmt::format("{:.3g} years old", age_a);
+}
+
+/// Specimen, population and the rest in one line; what was assumed says so beside it.
 void TextWriter::context() {
     const panel::Context& given = of_.panel.context;
-    std::string text =
-        fmt::format("{} {}, {}",
-                    panel::k_specimen_names[static_cast<std::size_t>(given.specimen)],
-                    "specimen",
-                    panel::k_population_names[static_cast<std::size_t>(given.population)]);
+    const bool gas = of_.panel[panel::Analyte::ph] || of_.panel[panel::Analyte::pco2];
+    std::vector<std::string> parts;
+    const auto add = [&](std::string text, std::string_view item) {
+        const std::string prefix = std::string(item) + ": ";
+        const bool assumed =
+            !item.empty() &&
+            std::any_of(given.assumed.begin(), given.assumed.end(), [&](const std::string& entry) {
+                return entry.starts_with(prefix);
+            });
+        parts.push_back(std::move(text) + (assumed ? " (assumed)" : ""));
+    };
+    add(given.specimen == panel::Specimen::not_stated
+            ? "not stated"
+            : std::string(panel::k_specimen_names[static_cast<std::size_t>(given.specimen)]),
+        "specimen");
+    add(std::string(panel::k_population_names[static_cast<std::size_t>(given.population)]),
+        "population");
+    if (given.age_a) {
+        add(age_text(*given.age_a), "age");
+    }
     if (given.altitude_m) {
-        text += fmt::format(", altitude {} m", engine::printed(*given.altitude_m, 0));
+        add(fmt::format("altitude {} m", engine::printed(*given.altitude_m, 0)), "altitude");
     }
-    text += given.onset == panel::StatedOnset::unknown
-                ? ", onset not stated"
-                : fmt::format(", onset {}",
-                              panel::k_onset_names[static_cast<std::size_t>(given.onset)]);
+    if (given.onset != panel::StatedOnset::unknown) {
+        add(fmt::format("onset {}", panel::k_onset_names[static_cast<std::size_t>(given.onset)]),
+            {});
+    } else if (gas) {
+        add("onset not stated", {});
+    }
     if (given.baseline_pco2_mmHg) {
-        text +=
-            fmt::format(", baseline pCO2 {} mmHg", engine::printed(*given.baseline_pco2_mmHg, 0));
+        add(fmt::format("usual pCO2 {} mmHg", engine::printed(*given.baseline_pco2_mmHg, 0)), {});
     }
-    if (!given.assumed.empty()) {
-        std::string assumed;
-        for (const std::string& item : given.assumed) {
-            assumed += (assumed.empty() ? "" : ", ") + item;
-        }
-        out_.item("Assumed: ", assumed);
+    if (given.baseline_hco3_mmol_L) {
+        add(fmt::format("usual bicarbonate {} mmol/L",
+                        engine::printed(*given.baseline_hco3_mmol_L, 1)),
+            {});
     }
-    out_.item("Context: ", text);
-    out_.item("Rules:   ",
+    out_.item("Specimen: ", listed(parts));
+}
+
+void TextWriter::rule_set() {
+    out_.item("Rules: ",
               fmt::format("{} {}{}, sha256 {}",
                           rules().id,
                           rules().version,
                           rules().approved_role.empty() ? " (draft)"
                                                         : ", approved " + rules().approved_date,
-                          full_ ? rules().sha256 : rules().sha256.substr(0, 12)));
+                          full_ ? rules().sha256 : rules().sha256.substr(0, k_short_hash)));
 }
 
 void TextWriter::critical() {
@@ -153,43 +153,7 @@ void TextWriter::critical() {
     }
 }
 
-void TextWriter::panel() {
-    std::vector<std::vector<std::string>> rows;
-    for (const AnalyteResult& result : of_.entered) {
-        const panel::AnalyteInfo& info = (*rules().catalogue)[result.analyte];
-        const panel::Entered& entered = *of_.panel[result.analyte];
-        const bool censored = entered.censoring != panel::Censoring::none;
-        rows.push_back(
-            {std::string(panel::id_of(result.analyte)),
-             censored ? entered.as_entered
-                      : value_text(entered.value, info.decimals, result.low, result.high) +
-                            (info.unit_text.empty() ? "" : " " + info.unit_text),
-             std::string(censored ? "censored" : side(entered.value, result.low, result.high)),
-             range_text(result.low, result.high, info.decimals),
-             entered.as_entered + (entered.note.empty() ? "" : "; " + entered.note)});
-    }
-    out_.heading("Panel (value, against interval, as entered)");
-    out_.table(rows, "  ");
-    rows.clear();
-    for (const QuantityResult& quantity : of_.quantities) {
-        if (!quantity.value || quantity.from == "measured" || quantity.from == "as reported") {
-            continue;
-        }
-        rows.push_back(
-            {quantity.label,
-             value_text(*quantity.value, quantity.decimals, quantity.low, quantity.high) +
-                 (quantity.unit.empty() ? "" : " " + unit_words(quantity.unit)),
-             std::string(side(*quantity.value, quantity.low, quantity.high)),
-             range_text(quantity.low, quantity.high, quantity.decimals),
-             quantity.from +
-                 (quantity.interval_note.empty() ? "" : "; " + quantity.interval_note)});
-    }
-    if (!rows.empty()) {
-        out_.heading("Calculated");
-        out_.table(rows, "  ");
-    }
-}
-
+/// What stops an interpretation is its first sentence, and not repeated here.
 void TextWriter::trust() {
     std::size_t passed = 0;
     std::size_t applied = 0;
@@ -198,29 +162,34 @@ void TextWriter::trust() {
         applied += check.outcome == Outcome::not_applicable ? 0U : 1U;
     }
     out_.heading(fmt::format(
-        "Can the numbers be trusted: {} of {} checks that apply pass", passed, applied));
+        "Can the numbers be trusted? {} of the {} checks that apply pass.", passed, applied));
     for (const CheckResult& check : of_.checks) {
-        if (check.outcome == Outcome::stop || check.outcome == Outcome::warn) {
-            out_.item(check.outcome == Outcome::stop ? "  stop  " : "  warn  ", check.detail);
+        if (check.outcome == Outcome::warn) {
+            out_.item("  doubt: ", check.detail);
         }
     }
 }
 
 void TextWriter::reading() {
-    out_.heading(of_.interpretable ? "Reading, then every other explanation that fits"
-                                   : "Not interpretable");
+    out_.heading("Interpretation");
     for (const std::string& sentence : of_.sentences) {
         out_.item("  ", sentence);
     }
 }
 
+/// Whether a line compares numbers, rather than to say what is given or missing.
+bool compares(const engine::Reason& reason) {
+    return reason.depth == 0 && reason.text.find_first_of("<>=") != std::string::npos;
+}
+
+/// One numbered reason; on the first screen only its comparisons, each once.
 void TextWriter::reason_block(std::string_view title,
                               const std::vector<engine::Reason>& because,
                               const std::vector<rule::Citation>& sources) {
     const std::string lead = fmt::format("  {:>2} ", ++reason_number_);
     out_.item(lead, title);
     for (const engine::Reason& reason : because) {
-        if (full_ || reason.depth <= 1) {
+        if (full_ || (compares(reason) && told_.insert(reason.text).second)) {
             out_.item(std::string(lead.size() + 2 * static_cast<std::size_t>(reason.depth), ' '),
                       reason.text);
         }
@@ -228,19 +197,44 @@ void TextWriter::reason_block(std::string_view title,
     out_.item(std::string(lead.size(), ' ') + "source: ", cited(sources));
 }
 
+/// In full every explanation and finding; else the reading, and the findings that name its kinds.
 void TextWriter::reasons() {
+    const auto wanted = [&](const FindingResult& finding) {
+        return finding.state == Truth::yes && (full_ || supports_reading(finding));
+    };
+    if (of_.explanations.empty() &&
+        std::none_of(of_.findings.begin(), of_.findings.end(), wanted)) {
+        return;
+    }
     out_.heading("Reasons");
     for (const ExplanationResult& explanation : of_.explanations) {
-        reason_block(explanation.statement, explanation.because, explanation.sources);
-        if (!full_) {
-            break;
+        if (full_ || &explanation == &of_.explanations.front()) {
+            reason_block(explanation.statement, explanation.because, explanation.sources);
         }
     }
     for (const FindingResult& finding : of_.findings) {
-        if (finding.state == Truth::yes && (full_ || !finding.asserts.empty())) {
-            reason_block(finding.statement, finding.because, finding.sources);
+        if (wanted(finding)) {
+            // On the first screen its sentence, which has values and limit, is enough.
+            reason_block(finding.statement,
+                         full_ ? finding.because : std::vector<engine::Reason>{},
+                         finding.sources);
+            if (!finding.consider.empty()) {
+                out_.item("     commonly considered: ", listed(finding.consider, "; "));
+            }
         }
     }
+}
+
+/// Whether a finding asserts a disorder that the reading names.
+bool TextWriter::supports_reading(const FindingResult& finding) const {
+    if (of_.explanations.empty()) {
+        return !finding.asserts.empty();
+    }
+    const std::vector<std::string>& named = of_.explanations.front().disorders;
+    return std::any_of(
+        finding.asserts.begin(), finding.asserts.end(), [&](const std::string& disorder) {
+            return std::find(named.begin(), named.end(), disorder) != named.end();
+        });
 }
 
 std::string_view verdict_text(Verdict verdict) {
@@ -263,10 +257,7 @@ void TextWriter::everything() {
     out_.heading("Findings that are open, with what would decide them");
     for (const FindingResult& finding : of_.findings) {
         if (finding.state == Truth::unknown) {
-            std::string needed;
-            for (const std::string& analyte : finding.needs) {
-                needed += (needed.empty() ? "" : ", ") + analyte;
-            }
+            const std::string needed = listed(labels(finding.needs));
             out_.item("  ",
                       (finding.label.empty() ? finding.id : finding.label) +
                           (needed.empty() ? "" : ": needs " + needed));
@@ -282,35 +273,38 @@ void TextWriter::everything() {
     }
 }
 
+/// Analytes by the names that people use.
+std::vector<std::string> TextWriter::labels(const std::vector<std::string>& analytes) const {
+    std::vector<std::string> words;
+    for (const std::string& id : analytes) {
+        const std::optional<panel::Analyte> analyte = panel::analyte_of(id);
+        words.push_back(analyte ? (*rules().catalogue)[*analyte].label : id);
+    }
+    return words;
+}
+
 void TextWriter::closing() {
-    std::string wanted;
-    for (const std::string& analyte : of_.would_help) {
-        wanted += (wanted.empty() ? "" : ", ") + analyte;
-    }
-    if (!wanted.empty() || !of_.unchecked.empty()) {
-        out_.blank();
-    }
-    if (!wanted.empty()) {
-        out_.item("Would help: ", wanted);
+    out_.blank();
+    if (!of_.would_help.empty()) {
+        out_.item("Would help: ", listed(labels(of_.would_help)));
     }
     if (!of_.unchecked.empty()) {
-        std::string ids;
-        for (const std::string& id : of_.unchecked) {
-            ids += (ids.empty() ? "" : ", ") + id;
-        }
         out_.item("",
-                  fmt::format("{} of the values used {} not been checked against {} source{}",
-                              of_.unchecked.size(),
-                              of_.unchecked.size() == 1 ? "has" : "have",
-                              of_.unchecked.size() == 1 ? "its" : "their",
-                              full_ ? ": " + ids : "."));
+                  fmt::format("{} not checked against {}: {}",
+                              of_.unchecked.size() == 1 ? "A rule in use holds a value"
+                                                        : "Rules in use hold values",
+                              of_.unchecked.size() == 1 ? "its source" : "their sources",
+                              listed(of_.unchecked)));
+    }
+    if (!full_) {
+        out_.item("", "--full gives every formula, check and finding.");
     }
 }
 
 }  // namespace
 
 std::string text_report(const Interpretation& interpretation, const TextOptions& options) {
-    return TextWriter(interpretation, options).write();
+    return with_caution(TextWriter(interpretation, options).write(), options.width);
 }
 
 }  // namespace isohydric::report
