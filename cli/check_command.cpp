@@ -8,6 +8,7 @@
 #include "isohydric/report/json_report.hpp"
 #include "isohydric/report/text_report.hpp"
 
+#include <array>
 #include <iostream>
 #include <iterator>
 #include <map>
@@ -31,7 +32,27 @@ struct CheckOptions {
     bool full = false;
 };
 
-/// The arguments as one source text, so that a message can point at the very characters.
+/// Name, what stands behind it, help.
+struct ContextOption {
+    const char *name, *type, *help;
+};
+
+constexpr std::array k_context_options{
+    ContextOption{"specimen",
+                  "SPECIMEN",
+                  "arterial, venous, central-venous, mixed-venous, capillary, cord-arterial or "
+                  "cord-venous (default for a gas: arterial)"},
+    ContextOption{"population",
+                  "POPULATION",
+                  "adult, child, neonate, pregnancy-1, pregnancy-2 or pregnancy-3 (default: by "
+                  "age, else adult)"},
+    ContextOption{"age", "AGE", "with its unit: 15min, 6h, 3d, 2mo, 4y"},
+    ContextOption{"altitude", "METRES", "where the patient lives, in metres"},
+    ContextOption{"onset", "ONSET", "of the respiratory disorder: acute, chronic or unknown"},
+    ContextOption{"baseline-pCO2", "VALUE", "known usual pCO2 of a chronic retainer"},
+    ContextOption{"baseline-HCO3", "VALUE", "known usual bicarbonate"}};
+
+/// The arguments as one source text, so that a message can point at the argument.
 class Arguments {
   public:
     explicit Arguments(const std::vector<std::string>& items) {
@@ -43,8 +64,8 @@ class Arguments {
         source_ = diag::make_source("arguments", text);
     }
 
-    [[nodiscard]] diag::Place place(std::size_t item, std::size_t begin, std::size_t end) const {
-        return {source_, {begins_[item] + begin, begins_[item] + end}};
+    [[nodiscard]] diag::Place place(std::size_t item, std::size_t length) const {
+        return {source_, {begins_[item], begins_[item] + length}};
     }
 
   private:
@@ -71,9 +92,8 @@ void read_items(const std::vector<std::string>& items,
         const std::string& item = items[i];
         const std::size_t equals = item.find('=');
         if (equals != std::string::npos) {
-            reader.add(item.substr(0, equals),
-                       item.substr(equals + 1),
-                       arguments.place(i, equals + 1, item.size()));
+            reader.add(
+                item.substr(0, equals), item.substr(equals + 1), arguments.place(i, item.size()));
         } else if (item == "-") {
             read_document("standard input",
                           std::string{std::istreambuf_iterator<char>(std::cin), {}},
@@ -83,22 +103,11 @@ void read_items(const std::vector<std::string>& items,
             read_document(item, std::move(*text), reader, report);
         } else {
             report.error("check-argument",
-                         arguments.place(i, 0, item.size()),
+                         arguments.place(i, item.size()),
                          fmt::format("\"{}\" is neither name=value nor a file that can be read "
                                      "({}); write for example pH=7.32",
                                      item,
                                      text.error()));
-        }
-    }
-}
-
-void read_answers(const panel::Catalogue& catalogue, panel::PanelReader& reader) {
-    for (const auto& [name, text] : ask_for_panel(catalogue)) {
-        const diag::Place place{diag::make_source(name, text), {0, text.size()}};
-        if (name == "specimen") {
-            reader.set_context(name, text, place);
-        } else {
-            reader.add(name, text, place);
         }
     }
 }
@@ -116,6 +125,9 @@ std::optional<panel::Panel> read_panel(const CheckOptions& options,
                                        const panel::Catalogue& catalogue,
                                        const panel::SiteUnits* units,
                                        diag::Report& report) {
+    if (options.items.empty()) {
+        return ask_for_panel(catalogue, units, options.context);
+    }
     panel::PanelReader reader(catalogue, units, report);
     for (const auto& [name, text] : options.context) {
         if (!text.empty()) {
@@ -123,11 +135,7 @@ std::optional<panel::Panel> read_panel(const CheckOptions& options,
                 name, text, {diag::make_source("--" + name, text), {0, text.size()}});
         }
     }
-    if (options.items.empty()) {
-        read_answers(catalogue, reader);
-    } else {
-        read_items(options.items, reader, report);
-    }
+    read_items(options.items, reader, report);
     std::optional<panel::Panel> panel = reader.finish();
     return report.has_errors() ? std::nullopt : std::move(panel);
 }
@@ -164,33 +172,31 @@ void add_check_command(CLI::App& app, Action& chosen) {
     auto options = std::make_shared<CheckOptions>();
     CLI::App* command = app.add_subcommand(
         "check", "Interpret one panel: name=value ..., a JSON file, or - for standard input");
-    command->add_option(
-        "panel", options->items, "pH=7.21 pCO2=3.9kPa Na=138 ..., a JSON file, or -");
-    const auto add_context = [&](const std::string& name, const std::string& help) {
-        command->add_option("--" + name, options->context[name], help);
+    command
+        ->add_option("panel",
+                     options->items,
+                     "pH=7.21 pCO2=3.9kPa Na=138 ..., a JSON file, or - for standard input; "
+                     "without one, on a terminal, it asks")
+        ->type_name("NAME=VALUE");
+    const auto add = [&](const std::string& name,
+                         std::string& value,
+                         const std::string& type,
+                         const std::string& help) {
+        return command->add_option("--" + name, value, help)->type_name(type);
     };
-    add_context(
-        "specimen",
-        "arterial, venous, central-venous, mixed-venous, capillary, cord-arterial or cord-venous");
-    add_context("population", "adult, child, neonate, pregnancy-1, pregnancy-2 or pregnancy-3");
-    add_context("age", "15min, 3d, 4y");
-    add_context("altitude", "metres");
-    add_context("onset", "onset of the respiratory disorder: acute, chronic or unknown");
-    add_context("baseline-pCO2", "known usual pCO2 of a chronic retainer");
-    add_context("baseline-HCO3", "known usual bicarbonate");
-    command->add_option("--rules", options->rules, "rule set in force (default: the shipped one)");
-    command->add_option(
-        "--units", options->units, "units of bare numbers: si, conventional or a file");
-    command->add_option("--site", options->site, "site file with rule set and units");
-    command->add_option("--format", options->format, "text or json")
-        ->check(CLI::IsMember({"text", "json"}));
+    for (const auto& [name, type, help] : k_context_options) {
+        add(name, options->context[name], type, help);
+    }
+    add("rules", options->rules, "SET", "a rule set of your own (default: the shipped one)");
+    add("units", options->units, "si|conventional|FILE", "units of numbers written without one");
+    add("site", options->site, "FILE", "site file, which names rule set and units");
+    CLI::Validator format = CLI::IsMember({"text", "json"});
+    format.description("");  // the type says it already
+    add("format", options->format, "text|json", "how the result is written")->check(format);
     command->add_flag("--full", options->full, "every check, finding, disorder and reason");
-    command->callback([options, command, &chosen] {
+    command->callback([options, &chosen] {
         if (options->items.empty() && !person_at_terminal()) {
-            throw CLI::ValidationError(
-                "panel",
-                "no panel given: write name=value, a JSON file, or - for standard input\n" +
-                    command->help());
+            throw CLI::RequiredError("panel");
         }
         chosen = [options] {
             return check(*options);

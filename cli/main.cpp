@@ -7,6 +7,7 @@
 #include <spdlog/sinks/stdout_sinks.h>
 #include <spdlog/spdlog.h>
 
+#include <cstdio>
 #include <exception>
 #include <memory>
 
@@ -15,23 +16,41 @@
 namespace {
 
 using isohydric::cli::Exit;
+using isohydric::report::with_caution;
+
+/// What goes wrong on the command line is said on standard error; help that nobody asked for, too.
+int usage_error(const std::string& text) {
+    std::fputs(text.c_str(), stderr);
+    return static_cast<int>(Exit::usage);
+}
 
 int run(int argc, char** argv) {
     CLI::App app("Interprets blood-gas and electrolyte panels from rules that a laboratory can "
                  "read and change.");
     app.name("isohydric");
-    app.footer(std::string(isohydric::report::caution()));
-    app.set_version_flag("--version", std::string(isohydric::version()));
+    app.set_version_flag("--version", "isohydric " + std::string(isohydric::version()));
     app.require_subcommand(1);
     isohydric::cli::Action chosen;
     isohydric::cli::add_check_command(app, chosen);
     isohydric::cli::add_rules_command(app, chosen);
     try {
         app.parse(argc, argv);
+    } catch (const CLI::CallForHelp&) {
+        isohydric::cli::print(with_caution(app.help()));
+        return static_cast<int>(Exit::done);
+    } catch (const CLI::Success& version) {
+        isohydric::cli::print(with_caution(version.what()));
+        return static_cast<int>(Exit::done);
+    } catch (const CLI::RequiredError&) {
+        // A command is missing, its panel, or its id: its help says what can stand there.
+        std::string unknown;
+        for (const std::string& word : app.remaining()) {
+            unknown += "isohydric: there is no command \"" + word + "\"\n\n";
+        }
+        return usage_error(unknown + with_caution(app.help()));
     } catch (const CLI::ParseError& error) {
-        const bool asked = error.get_exit_code() == static_cast<int>(CLI::ExitCodes::Success);
-        app.exit(error);
-        return static_cast<int>(asked ? Exit::done : Exit::usage);
+        return usage_error(std::string("isohydric: ") + error.what() +
+                           "\nisohydric --help tells what can be written.\n");
     }
     return static_cast<int>(chosen());
 }

@@ -1,16 +1,21 @@
 // Asks for a panel at a terminal, value by value, with units and ranges.
 #pragma once
 
-#include "isohydric/panel/catalogue.hpp"
+#include "isohydric/panel/panel.hpp"
+#include "isohydric/panel/site_units.hpp"
 
+#include <map>
+#include <optional>
 #include <string>
-#include <utility>
-#include <vector>
 
 namespace isohydric::cli {
 
-/// Pairs of name and text as typed; an empty answer leaves a value out, `.` ends the questions.
-[[nodiscard]] std::vector<std::pair<std::string, std::string>>
-ask_for_panel(const panel::Catalogue& catalogue);
+/// Asks for specimen, values and onset; what `context` says already is not asked again. An answer that cannot be read is
+/// asked again at once. An empty answer leaves a value out; a single point, or the end of input, ends the questions.
+/// Nothing is given if no value was.
+[[nodiscard]] std::optional<panel::Panel>
+ask_for_panel(const panel::Catalogue& catalogue,
+              const panel::SiteUnits* units,
+              const std::map<std::string, std::string>& context);
 
 }  // namespace isohydric::cli

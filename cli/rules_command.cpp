@@ -46,46 +46,48 @@ Exit show(const RulesOptions& options) {
         print(*page);
         return Exit::done;
     }
-    std::vector<std::string> ids;
-    for (const auto& entry : rules->by_id) {
-        ids.push_back(entry.first);
-    }
-    const std::string near = diag::nearest(options.id, ids);
+    const std::string near = diag::nearest(options.id, report::names_to_show(*rules));
     diag::Report report;
-    report.error(
-        "rules-unknown-id",
-        {},
-        fmt::format("no entry \"{}\" in {}{}",
-                    options.id,
-                    rules->id,
-                    near.empty() ? "; see isohydric rules list" : "; did you mean " + near + "?"));
+    report.error("rules-unknown-id",
+                 {},
+                 fmt::format("no entry or choice \"{}\" in {}; {}",
+                             options.id,
+                             rules->id,
+                             near.empty() ? "isohydric rules list names all"
+                                          : "did you mean " + near + "?"));
     print_diagnostics(report);
     return Exit::input_had_errors;
+}
+
+std::string counted(std::size_t count, std::string_view one, std::string_view many) {
+    return fmt::format("{} {}", count, count == 1 ? one : many);
+}
+
+std::string summary(const rule::RuleSet& rules, const interpret::CaseCounts& counts) {
+    return fmt::format("{} {}: {}, {} with {}, {} not met",
+                       rules.id,
+                       rules.version,
+                       counted(rules.by_id.size(), "entry", "entries"),
+                       counted(counts.cases, "case", "cases"),
+                       counted(counts.expectations, "expectation", "expectations"),
+                       counts.failed);
 }
 
 Exit lint(const RulesOptions& options) {
     diag::Report report;
     const std::shared_ptr<const rule::RuleSet> rules = load_rules(options.rules, true, report);
-    interpret::CaseCounts counts;
+    std::string text;
     if (rules) {
-        counts = interpret::run_cases(std::make_shared<const engine::Program>(rules), report);
+        const interpret::CaseCounts counts =
+            interpret::run_cases(std::make_shared<const engine::Program>(rules), report);
+        text = summary(*rules, counts) + "\n";
     }
     print_diagnostics(report);
-    print(fmt::format(
-        "{}\n\n{}{}\n\n{}\n",
-        report::caution(),
-        rules ? fmt::format("{} {}: {} entries, {} cases with {} expectations, {} not met; ",
-                            rules->id,
-                            rules->version,
-                            rules->by_id.size(),
-                            counts.cases,
-                            counts.expectations,
-                            counts.failed)
-              : std::string(),
-        report.diagnostics().empty() ? std::string("nothing found")
-                                     : fmt::format("{} found", report.diagnostics().size()),
-        report::caution()));
-    return report.diagnostics().empty() ? Exit::done : Exit::audit_found;
+    const std::size_t found = report.diagnostics().size();
+    text += found == 0 ? "Nothing found.\n"
+                       : counted(found, "thing", "things") + " found, each said above.\n";
+    print(report::with_caution(text));
+    return found == 0 ? Exit::done : Exit::audit_found;
 }
 
 }  // namespace
@@ -97,7 +99,6 @@ void add_rules_command(CLI::App& app, Action& chosen) {
     const auto add =
         [&](const std::string& name, const std::string& help, Exit (*run)(const RulesOptions&)) {
             CLI::App* sub = command->add_subcommand(name, help);
-            sub->add_option("--rules", options->rules, "rule set (default: the shipped one)");
             sub->callback([options, run, &chosen] {
                 chosen = [options, run] {
                     return run(*options);
@@ -105,12 +106,29 @@ void add_rules_command(CLI::App& app, Action& chosen) {
             });
             return sub;
         };
-    add("list", "All entries, a line each", list)
-        ->add_option("--kind", options->kind, "only entries of this kind");
-    add("show", "One entry: expression, units, sources, alternatives", show)
-        ->add_option("id", options->id, "id of the entry")
+    const auto add_set = [&](CLI::App* sub) {
+        return sub
+            ->add_option(
+                "--rules", options->rules, "a rule set of your own (default: the shipped one)")
+            ->type_name("SET");
+    };
+    CLI::App* lister = add("list", "All entries by kind, a line each", list);
+    add_set(lister);
+    lister->add_option("--kind", options->kind, "only entries of this kind")
+        ->check(CLI::IsMember(report::kind_names()))
+        ->type_name("KIND");
+    CLI::App* shower =
+        add("show", "One entry or choice: formula, units, sources, alternatives", show);
+    add_set(shower);
+    shower->add_option("id", options->id, "id of an entry, or name of a choice")
+        ->type_name("ID")
         ->required();
-    add("lint", "Read everything, run the cases, say what is wrong (exit 3 if anything is)", lint);
+    CLI::App* linter = add(
+        "lint", "Read everything, run the cases, say what is wrong (exit 3 if anything is)", lint);
+    add_set(linter);
+    linter->add_option("set", options->rules, "the same as --rules")
+        ->type_name("SET")
+        ->excludes("--rules");
 }
 
 }  // namespace isohydric::cli

@@ -5,6 +5,7 @@
 #include "isohydric/engine/models.hpp"
 #include "isohydric/io/files.hpp"
 
+#include <cerrno>
 #include <cstdio>
 #include <cstdlib>
 #include <filesystem>
@@ -126,9 +127,11 @@ void print_diagnostics(const diag::Report& report) {
 }
 
 void print(const std::string& text) {
+    errno = 0;
     if (std::fwrite(text.data(), 1, text.size(), stdout) != text.size() ||
         std::fflush(stdout) != 0) {
-        throw std::runtime_error("standard output cannot be written");
+        throw std::runtime_error("standard output cannot be written: " +
+                                 std::generic_category().message(errno));
     }
 }
 
