@@ -168,7 +168,7 @@ struct Disorder {
     bool main = false;                     ///< one of the four that explanations count
     std::optional<std::uint32_t> kind_of;  ///< the main disorder that it is a kind of
     std::vector<std::string> approaches;   ///< that can speak of it
-    ExpressionPtr judged_when;             ///< where explanations can tell of it; null: wherever they fit
+    ExpressionPtr judged_when;  ///< where explanations can tell of it; null: wherever they fit
 };
 
 /// A choice among published alternatives; its quantities and conditions are in force while it is chosen.

@@ -5,6 +5,7 @@
 #include "isohydric/rule/detail/grammar.hpp"
 
 #include <algorithm>
+#include <iterator>
 
 namespace isohydric::rule {
 namespace {
@@ -42,11 +43,11 @@ std::string written_name(std::span<const std::string> path) {
 
 std::optional<NamedSymbol> find_context_item(std::string_view item) {
     const auto& names = panel::k_context_item_names;
-    const auto found = std::find(names.begin(), names.end(), item);
-    if (found == names.end()) {
+    const auto index = static_cast<std::size_t>(
+        std::distance(names.begin(), std::find(names.begin(), names.end(), item)));
+    if (index == names.size()) {
         return std::nullopt;
     }
-    const auto index = static_cast<std::size_t>(found - names.begin());
     NamedSymbol named;
     named.symbol = {SymbolKind::context, static_cast<std::uint32_t>(index), {}};
     named.codes = codes_of(static_cast<ContextItem>(index));

@@ -26,7 +26,9 @@ class NameTable {
   public:
     NameTable() = default;
     NameTable(const NameTable&) = delete;
+    NameTable(NameTable&&) = delete;
     NameTable& operator=(const NameTable&) = delete;
+    NameTable& operator=(NameTable&&) = delete;
     virtual ~NameTable() = default;
 
     [[nodiscard]] virtual std::optional<NamedSymbol>

@@ -29,7 +29,7 @@ class Printer {
   public:
     explicit Printer(const NameText& name_text) : name_text_(name_text) {}
 
-    Text print(const Expression& node) const {
+    [[nodiscard]] Text print(const Expression& node) const {
         if (const OperatorInfo* const info = find_operator(node.kind)) {
             return operation(node, *info);
         }
@@ -48,7 +48,7 @@ class Printer {
     }
 
   private:
-    std::string leaf(const Expression& node) const {
+    [[nodiscard]] std::string leaf(const Expression& node) const {
         if (node.kind == NodeKind::name) {
             return name_text_(node);
         }
@@ -59,17 +59,17 @@ class Printer {
         return as_written ? node.text : node.text + " " + node.written_unit.code();
     }
 
-    std::string inner(const Expression& node, std::size_t child) const {
+    [[nodiscard]] std::string inner(const Expression& node, std::size_t child) const {
         return print(*node.children[child]).words;
     }
 
     /// The words of a child, in parentheses if they hold together less tightly than `level`.
-    std::string at_least(Level level, const Expression& child) const {
+    [[nodiscard]] std::string at_least(Level level, const Expression& child) const {
         Text text = print(child);
         return text.level < level ? "(" + text.words + ")" : std::move(text.words);
     }
 
-    Text operation(const Expression& node, const OperatorInfo& info) const {
+    [[nodiscard]] Text operation(const Expression& node, const OperatorInfo& info) const {
         const Expression& left = *node.children[0];
         const Expression& right = *node.children[1];
         if (is_inserted_factor(right)) {
@@ -94,7 +94,7 @@ class Printer {
         return info.spelling;
     }
 
-    Text function(const Expression& node) const {
+    [[nodiscard]] Text function(const Expression& node) const {
         const Expression& value = *node.children[0];
         if (family_of(node.kind) == Family::presence) {
             const bool given = node.kind == NodeKind::call_exists;

@@ -4,6 +4,7 @@
 
 #include <algorithm>
 #include <array>
+#include <iterator>
 
 namespace isohydric::rule {
 namespace {
@@ -100,12 +101,13 @@ std::optional<NamedSymbol> RuleNames::find_single(std::string_view name) const {
 std::optional<NamedSymbol> RuleNames::find_limit(std::string_view name,
                                                  std::string_view part) const {
     const auto index = rules_.find_interval_name(name);
-    const auto found = std::ranges::find(k_limit_parts, part);
-    if (!index || found == k_limit_parts.end()) {
+    const auto which = static_cast<std::size_t>(
+        std::distance(k_limit_parts.begin(), std::ranges::find(k_limit_parts, part)));
+    if (!index || which == k_limit_parts.size()) {
         return std::nullopt;
     }
     NamedSymbol limit = number(SymbolKind::limit, *index, rules_.interval_units[*index]);
-    limit.symbol.limit_part = static_cast<LimitPart>(found - k_limit_parts.begin());
+    limit.symbol.limit_part = static_cast<LimitPart>(which);
     return limit;
 }
 

@@ -56,7 +56,7 @@ std::string author_line(const diag::Json& item) {
         const std::string given = initials(text_of(author, "given"));
         names.push_back(family.empty()  ? text_of(author, "literal")
                         : given.empty() ? family
-                                        : family + " " + given);
+                                        : fmt::format("{} {}", family, given));
     }
     return diag::join(names, ", ");
 }

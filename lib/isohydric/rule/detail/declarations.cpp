@@ -259,9 +259,10 @@ class Declarer {
 };
 
 /// The conventions of all drafts, by choice.
-std::map<std::string, std::vector<const Draft*>, std::less<>>
-alternatives_by_choice(const std::vector<Draft>& drafts) {
-    std::map<std::string, std::vector<const Draft*>, std::less<>> alternatives;
+using Alternatives = std::map<std::string, std::vector<const Draft*>, std::less<>>;
+
+Alternatives alternatives_by_choice(const std::vector<Draft>& drafts) {
+    Alternatives alternatives;
     for (const Draft& draft : drafts) {
         if (draft.kind == EntryKind::convention) {
             alternatives[choice_of(*draft.json)].push_back(&draft);
@@ -272,10 +273,31 @@ alternatives_by_choice(const std::vector<Draft>& drafts) {
 
 std::vector<std::string> ids_of(const std::vector<const Draft*>& drafts) {
     std::vector<std::string> ids;
+    ids.reserve(drafts.size());
     for (const Draft* draft : drafts) {
         ids.push_back(draft->id);
     }
     return ids;
+}
+
+/// Reports a choice that nobody offers, and an alternative that the choice does not have.
+void check_choice(const Written& choice,
+                  const Written& convention,
+                  const Alternatives& alternatives,
+                  diag::Report& report) {
+    const auto found = alternatives.find(choice.text);
+    const auto ids =
+        found == alternatives.end() ? std::vector<std::string>() : ids_of(found->second);
+    if (std::ranges::find(ids, convention.text) != ids.end()) {
+        return;
+    }
+    report.error("rule-choice",
+                 ids.empty() ? choice.place : convention.place,
+                 ids.empty() ? fmt::format("no convention belongs to a choice \"{}\"", choice.text)
+                             : fmt::format("\"{}\" is no alternative of \"{}\"; choose one of {}",
+                                           convention.text,
+                                           choice.text,
+                                           diag::join(ids, ", ")));
 }
 
 }  // namespace
@@ -287,20 +309,7 @@ Chosen choose_conventions(const std::vector<SetFile>& chain,
     Chosen chosen;
     for (const SetFile& set : chain) {
         for (const auto& [choice, convention] : set.conventions) {
-            const auto found = alternatives.find(choice.text);
-            const auto ids =
-                found == alternatives.end() ? std::vector<std::string>() : ids_of(found->second);
-            if (std::ranges::find(ids, convention.text) == ids.end()) {
-                report.error(
-                    "rule-choice",
-                    ids.empty() ? choice.place : convention.place,
-                    ids.empty()
-                        ? fmt::format("no convention belongs to a choice \"{}\"", choice.text)
-                        : fmt::format("\"{}\" is no alternative of \"{}\"; choose one of {}",
-                                      convention.text,
-                                      choice.text,
-                                      diag::join(ids, ", ")));
-            }
+            check_choice(choice, convention, alternatives, report);
             chosen[choice.text] = convention.text;
         }
     }

@@ -37,7 +37,7 @@ class Documents {
     const Document* read_if_present(const std::string& path);
 
   private:
-    const Document* kept(std::string_view path) const;
+    [[nodiscard]] const Document* kept(std::string_view path) const;
     const Document* keep(const std::string& path, std::string text);
 
     const FileReader& files_;

@@ -14,7 +14,7 @@ namespace {
 
 /// What is known not to be empty.
 struct Facts {
-    std::set<std::string> present;               // number forms of expressions
+    std::set<std::string> present;                // number forms of expressions
     const NeverEmptyName* never_empty = nullptr;  // of names, if anybody knows
 
     [[nodiscard]] bool hold(const Expression& expression) const {

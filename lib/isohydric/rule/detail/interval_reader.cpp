@@ -7,10 +7,10 @@
 namespace isohydric::rule::detail {
 namespace {
 
-template <class Code, std::size_t count>
+template <class Code, std::size_t Count>
 std::vector<Code> read_codes(diag::ObjectReader& reader,
                              const char* name,
-                             const std::array<std::string_view, count>& words,
+                             const std::array<std::string_view, Count>& words,
                              diag::Report& report) {
     std::vector<Code> codes;
     for (const Written& word : read_list(reader, name, report)) {
