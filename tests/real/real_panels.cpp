@@ -146,18 +146,20 @@ class RealPanels {
         run_gases();
         run_chemistries();
         limits();
-        fmt::print("{} panels read, {} refused as entered, {} not interpretable, each with its reason\n",
-                   read_,
-                   unreadable_,
-                   stopped_);
+        fmt::print(
+            "{} panels read, {} refused as entered, {} not interpretable, each with its reason\n",
+            read_,
+            unreadable_,
+            stopped_);
         require("every panel of both files was seen",
                 read_ == gases_.size() + chemistries_.size() && read_ > 9000 && unreadable_ <= 1);
         require("calculated total CO2 less ours: |mean| <= 0.05 and SD <= 0.4 over 1,166 gases",
                 total_.n == 1166 && std::fabs(total_.mean()) <= 0.05 && total_.sd() <= 0.4);
         require("reported gap within 1 in all 2,134 chemistries", gap_.n == 2134 && gap_off_ == 0);
-        require("base excess of blood within 2.5 of the reported one in 95 % of those with haemoglobin"
-                "haemoglobin",
-                base_.n > 400 && base_off_ * 20 <= base_.n);
+        require(
+            "base excess of blood within 2.5 of the reported one in 95 % of those with haemoglobin"
+            "haemoglobin",
+            base_.n > 400 && base_off_ * 20 <= base_.n);
         require("at least one fit for each usable arterial gas",
                 usable_ == 504 && without_fit_ == 0);
         require("at most 1.6 explanations listed on average",
