@@ -8,6 +8,7 @@
 #include <fstream>
 #include <set>
 #include <string>
+#include <tuple>
 
 #include "chem/all_models.hpp"
 #include "chem/published_table.hpp"
@@ -120,15 +121,15 @@ TEST_CASE("published tables: a file without rows, without citation or not there 
         std::ofstream(path) << text;
         return path;
     };
-    CHECK_THROWS(
-        read_published_table(written("# By hand [@kell1975, equation 16]\nmodel,expected\n")));
-    CHECK_THROWS(read_published_table(written("model,expected\nx,1\n")));
-    CHECK_THROWS(
-        read_published_table(written("# By hand [@kell1975, equation 16]\nmodel,expected\nx\n")));
-    CHECK_NOTHROW(
-        read_published_table(written("# By hand [@kell1975, equation 16]\nmodel,expected\nx,1\n")));
+    CHECK_THROWS(std::ignore = read_published_table(
+                     written("# By hand [@kell1975, equation 16]\nmodel,expected\n")));
+    CHECK_THROWS(std::ignore = read_published_table(written("model,expected\nx,1\n")));
+    CHECK_THROWS(std::ignore = read_published_table(
+                     written("# By hand [@kell1975, equation 16]\nmodel,expected\nx\n")));
+    CHECK_NOTHROW(std::ignore = read_published_table(
+                      written("# By hand [@kell1975, equation 16]\nmodel,expected\nx,1\n")));
     std::filesystem::remove(path);
-    CHECK_THROWS(read_published_table(path));
+    CHECK_THROWS(std::ignore = read_published_table(path));
 }
 
 TEST_CASE("published tables: half a unit of the last printed digit") {

@@ -87,7 +87,9 @@ TEST_CASE("population and age: a contradiction is an error with both places") {
                                                                  {"neonate", "28d"},
                                                                  {"pregnancy-1", "3d"},
                                                                  {"pregnancy-2", "8y"}};
-    for (const auto& [population, age] : wrong) {
+    for (const auto& pair : wrong) {
+        const auto population = pair.first;
+        const auto age = pair.second;
         const Outcome outcome = read({{"pH", "7.4"}}, {{"population", population}, {"age", age}});
         CAPTURE(population);
         CAPTURE(age);

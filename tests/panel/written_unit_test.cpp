@@ -121,7 +121,9 @@ TEST_CASE("units that do not belong to the analyte are refused, whatever their d
                       {"pCO2", "40 Cel"},
                       {"Na", "3.2 g/L"},
                       {"temperature", "37 mmol/L"}};
-    for (const auto& [name, text] : wrong) {
+    for (const auto& pair : wrong) {
+        const auto name = pair.first;
+        const auto text = pair.second;
         const Outcome outcome = read({{name, text}});
         CAPTURE(name);
         CAPTURE(text);

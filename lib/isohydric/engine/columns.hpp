@@ -3,9 +3,9 @@
 
 #include "isohydric/engine/program.hpp"
 
+#include <bit>
 #include <cstddef>
 #include <cstdint>
-#include <limits>
 
 namespace isohydric::engine {
 
@@ -73,10 +73,21 @@ class Columns {
     std::size_t rows_;
 };
 
-/// Whether a number may leave an operation; NaN and infinities become missing.
-[[nodiscard]] inline bool is_finite(double value) {
-    constexpr double k_largest = std::numeric_limits<double>::max();
-    return (value <= k_largest) & (value >= -k_largest);
+// In the loops over rows the bounds and pointers are locals, since a byte that is written might be part of anything else.
+// Flags are the numbers 0 and 1, and choices are made by masks: a comparison of bytes beside one of
+// doubles becomes a branch, and the loop is no longer made of vectors.
+using Flag = std::uint64_t;
+
+/// 1 for NaN and infinities, whose exponent bits are all ones; they may not leave an operation.
+[[nodiscard]] inline Flag not_finite(double value) {
+    constexpr std::uint64_t k_exponent = 0x7ff0000000000000;
+    constexpr std::uint64_t k_lowest_exponent_bit = 0x0010000000000000;
+    return ((std::bit_cast<std::uint64_t>(value) & k_exponent) + k_lowest_exponent_bit) >> 63;
+}
+
+/// `value`, or 0 where `absent` is 1.
+[[nodiscard]] inline double zero_if(Flag absent, double value) {
+    return std::bit_cast<double>(std::bit_cast<std::uint64_t>(value) & (absent - 1));
 }
 
 /// out[i] = function(a[i]), missing where a is or where the result is not finite.
@@ -88,11 +99,12 @@ void map_number(const Operation& operation, const Columns& columns, Function fun
     const std::uint8_t* __restrict a_missing = a.missing;
     double* __restrict values = out.values;
     std::uint8_t* __restrict missing = out.missing;
-    for (std::size_t row = 0; row < columns.rows(); ++row) {
+    const std::size_t rows = columns.rows();
+    for (std::size_t row = 0; row < rows; ++row) {
         const double value = function(a_values[row]);
-        const bool absent = (a_missing[row] != 0) | !is_finite(value);
-        values[row] = absent ? 0.0 : value;
-        missing[row] = absent ? 1 : 0;
+        const Flag absent = a_missing[row] | not_finite(value);
+        values[row] = zero_if(absent, value);
+        missing[row] = static_cast<std::uint8_t>(absent);
     }
 }
 
@@ -108,11 +120,12 @@ void map_numbers(const Operation& operation, const Columns& columns, Function fu
     const std::uint8_t* __restrict b_missing = b.missing;
     double* __restrict values = out.values;
     std::uint8_t* __restrict missing = out.missing;
-    for (std::size_t row = 0; row < columns.rows(); ++row) {
+    const std::size_t rows = columns.rows();
+    for (std::size_t row = 0; row < rows; ++row) {
         const double value = function(a_values[row], b_values[row]);
-        const bool absent = ((a_missing[row] | b_missing[row]) != 0) | !is_finite(value);
-        values[row] = absent ? 0.0 : value;
-        missing[row] = absent ? 1 : 0;
+        const Flag absent = a_missing[row] | b_missing[row] | not_finite(value);
+        values[row] = zero_if(absent, value);
+        missing[row] = static_cast<std::uint8_t>(absent);
     }
 }
 

@@ -5,6 +5,7 @@
 #include "isohydric/engine/columns.hpp"
 #include "isohydric/engine/models.hpp"
 
+#include <array>
 #include <cstddef>
 #include <limits>
 #include <string>
@@ -32,20 +33,36 @@ using Models = std::vector<Model>;
     return port(std::move(name), std::move(unit), {-k_largest, k_largest});
 }
 
+/// One input of a model over rows.
+struct ModelInput {
+    const double* __restrict values;
+    const std::uint8_t* __restrict missing;
+    double low, high;
+
+    /// 1 where it is missing or outside its domain, by the signs of the distances to the ends.
+    [[nodiscard]] Flag unusable(std::size_t row) const {
+        const auto above_low = std::bit_cast<Flag>(values[row] - low);
+        const auto below_high = std::bit_cast<Flag>(high - values[row]);
+        return missing[row] | ((above_low | below_high) >> 63);
+    }
+};
+
 /// Applies a formula, a lambda that captures nothing, to each row whose inputs are all present and in their domains.
 template <typename Formula, std::size_t... Input>
 void evaluate_rows(const rule::ModelSignature& signature, const ModelColumns& columns) {
-    const auto usable = [&](std::size_t input, std::size_t row) {
-        const double value = columns.values[input][row];
-        const rule::ModelPort& domain = signature.inputs[input];
-        return (columns.missing[input][row] == 0) & (value >= domain.low) & (value <= domain.high);
-    };
-    for (std::size_t row = 0; row < columns.rows; ++row) {
-        const bool all_usable = (... & usable(Input, row));
-        const double value = Formula{}(columns.values[Input][row]...);
-        const bool absent = !all_usable | !is_finite(value);
-        columns.result[row] = absent ? 0.0 : value;
-        columns.result_missing[row] = absent ? 1 : 0;
+    const std::array<ModelInput, sizeof...(Input)> inputs{
+        ModelInput{columns.values[Input],
+                   columns.missing[Input],
+                   signature.inputs[Input].low,
+                   signature.inputs[Input].high}...};
+    double* __restrict result = columns.result;
+    std::uint8_t* __restrict result_missing = columns.result_missing;
+    const std::size_t rows = columns.rows;
+    for (std::size_t row = 0; row < rows; ++row) {
+        const double value = Formula{}(inputs[Input].values[row]...);
+        const Flag absent = (... | inputs[Input].unusable(row)) | not_finite(value);
+        result[row] = zero_if(absent, value);
+        result_missing[row] = static_cast<std::uint8_t>(absent);
     }
 }
 

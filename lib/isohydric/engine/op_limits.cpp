@@ -2,7 +2,7 @@
 #include "isohydric/engine/operations.hpp"
 
 #include <algorithm>
-#include <array>
+#include <limits>
 
 namespace isohydric::engine {
 
@@ -62,8 +62,8 @@ void claim_rows(const rule::Interval& interval,
         const bool codes_fit =
             ((specimens >> rows.specimens[row]) & (populations >> rows.populations[row]) & 1U) != 0;
         const bool age_fits =
-            any_age | ((rows.ages.missing[row] == 0) & age.holds(rows.ages.values[row]));
-        const bool fits = codes_fit & age_fits & altitude.holds(rows.altitudes.values[row]);
+            any_age || (rows.ages.missing[row] == 0 && age.holds(rows.ages.values[row]));
+        const bool fits = codes_fit && age_fits && altitude.holds(rows.altitudes.values[row]);
         out[row] = fits ? index : out[row];
     }
 }
@@ -97,7 +97,8 @@ void op::load_limit(const Operation& operation, const Columns& columns) {
     const NumbersOut out = columns.numbers_out(operation.result);
     const std::vector<rule::Interval>& intervals = columns.rules().intervals;
     const auto part = static_cast<rule::LimitPart>(operation.part);
-    for (std::size_t row = 0; row < columns.rows(); ++row) {
+    const std::size_t rows = columns.rows();
+    for (std::size_t row = 0; row < rows; ++row) {
         std::optional<double> limit;
         if (chosen[row] != k_no_interval) {
             limit = limit_of(intervals[static_cast<std::size_t>(chosen[row])], part);

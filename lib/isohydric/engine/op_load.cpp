@@ -25,7 +25,8 @@ void compare_code(const Operation& operation,
                   std::uint32_t wanted) {
     const std::uint8_t* codes = columns.block().context_code(item).data();
     Truth* __restrict out = columns.truths_out(operation.result);
-    for (std::size_t row = 0; row < columns.rows(); ++row) {
+    const std::size_t rows = columns.rows();
+    for (std::size_t row = 0; row < rows; ++row) {
         out[row] = codes[row] == wanted ? Truth::yes : Truth::no;
     }
 }

@@ -10,7 +10,8 @@ template <typename Function>
 void map_truth(const Operation& operation, const Columns& columns, Function function) {
     const Truth* __restrict a = columns.truths(operation.operands[0]);
     Truth* __restrict out = columns.truths_out(operation.result);
-    for (std::size_t row = 0; row < columns.rows(); ++row) {
+    const std::size_t rows = columns.rows();
+    for (std::size_t row = 0; row < rows; ++row) {
         out[row] = function(a[row]);
     }
 }
@@ -21,7 +22,8 @@ void map_truths(const Operation& operation, const Columns& columns, Function fun
     const Truth* __restrict a = columns.truths(operation.operands[0]);
     const Truth* __restrict b = columns.truths(operation.operands[1]);
     Truth* __restrict out = columns.truths_out(operation.result);
-    for (std::size_t row = 0; row < columns.rows(); ++row) {
+    const std::size_t rows = columns.rows();
+    for (std::size_t row = 0; row < rows; ++row) {
         out[row] = function(a[row], b[row]);
     }
 }
@@ -59,7 +61,8 @@ void op::logical_not(const Operation& operation, const Columns& columns) {
 void op::number_exists(const Operation& operation, const Columns& columns) {
     const std::uint8_t* __restrict missing = columns.numbers(operation.operands[0]).missing;
     Truth* __restrict out = columns.truths_out(operation.result);
-    for (std::size_t row = 0; row < columns.rows(); ++row) {
+    const std::size_t rows = columns.rows();
+    for (std::size_t row = 0; row < rows; ++row) {
         out[row] = truth_of(missing[row] == 0);
     }
 }

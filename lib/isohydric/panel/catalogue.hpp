@@ -96,6 +96,11 @@ class Catalogue {
         std::optional<std::string> specimen;  ///< a name of k_specimen_names
         std::optional<std::string> variant;   ///< `urea nitrogen`: selects its own customary units
         bool negated = false;
+
+        /// The variant, or empty; lives as long as the alias.
+        [[nodiscard]] std::string_view variant_name() const {
+            return variant ? std::string_view{*variant} : std::string_view{};
+        }
     };
 
     /// A name and what it means.

@@ -179,13 +179,13 @@ void CatalogueReader::read_alias(const Json& value, AnalyteInfo& info) {
                       fmt::format("there is no specimen \"{}\"", *meaning.specimen));
     }
     const bool has_canonical = std::ranges::any_of(info.customary, [&](const CustomaryUnit& unit) {
-        return unit.ucum == info.unit.code() && unit.variant == meaning.variant.value_or("");
+        return unit.ucum == info.unit.code() && unit.variant == meaning.variant_name();
     });
     if (!has_canonical) {
         report_.error("catalogue-unit",
                       value.place(),
                       fmt::format("the variant \"{}\" has no customary unit {}",
-                                  *meaning.variant,
+                                  meaning.variant_name(),
                                   info.unit.code()));
     }
     if (name) {

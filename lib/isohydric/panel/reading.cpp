@@ -105,15 +105,13 @@ void PanelReader::set_context(std::string_view item, std::string_view text, diag
 WrittenValue PanelReader::written_value(const Item& item) const {
     return {.info = catalogue_[item.alias.analyte],
             .name = item.name,
-            .variant =
-                item.alias.variant ? std::string_view{*item.alias.variant} : std::string_view{},
+            .variant = item.alias.variant_name(),
             .number = item.quantity.number};
 }
 
 std::optional<CustomaryUnit> PanelReader::unit_of_site(const Item& item) const {
     const CustomaryUnit* stated =
-        site_ == nullptr ? nullptr
-                         : site_->find(item.alias.analyte, item.alias.variant.value_or(""));
+        site_ == nullptr ? nullptr : site_->find(item.alias.analyte, item.alias.variant_name());
     if (stated == nullptr) {
         return std::nullopt;
     }
@@ -205,7 +203,7 @@ std::optional<Entered> PanelReader::read_item(const Item& item) {
 
 /// Values that may take another's unit come after all others.
 void PanelReader::read_values() {
-    std::ranges::stable_partition(items_, [this](const Item& item) {
+    std::stable_partition(items_.begin(), items_.end(), [this](const Item& item) {
         return !catalogue_[item.alias.analyte].unit_from.has_value();
     });
     for (const Item& item : items_) {

@@ -26,7 +26,7 @@ void read_unit(const diag::Member& member,
     const units::NumberText one{.value = 1, .decimals = 0, .digits = "1"};
     const WrittenValue value{.info = catalogue[alias->analyte],
                              .name = member.name,
-                             .variant = alias->variant.value_or(""),
+                             .variant = alias->variant_name(),
                              .number = one};
     diag::Result<CustomaryUnit> unit = unit_as_written(value, member.value.text());
     if (!unit) {
