@@ -186,7 +186,7 @@ TEST_CASE("hazard: a sentence that rests on a shipped gap limit says so") {
     const auto result =
         interpreted({{"pH", "7.20"}, {"pCO2", "25 mmHg"}, {"Na", "140"}, {"Cl", "100"}});
     CHECK(finding_of(result, "gap-raised").shipped_limit);
-    CHECK(has(report::text_report(result), "shipped limit, not your laboratory's"));
+    CHECK(has(result.sentences.front(), "shipped limit, not your laboratory's"));
 }
 
 TEST_CASE("hazard: a value exactly on a limit is decided as printed [@hl7-fhirpath, equality of "

@@ -51,16 +51,38 @@ std::string compensation_words(const CompensationResult& band) {
                        band.from);
 }
 
+/// Said after a sentence that rests on a limit which belongs to an analyser and was not replaced.
+std::string whose_limit(bool shipped) {
+    return shipped ? " (shipped limit, not your laboratory's)" : "";
+}
+
+bool contains(const std::vector<std::string>& ids, const std::string& id) {
+    return std::find(ids.begin(), ids.end(), id) != ids.end();
+}
+
+/// Whether a kind of acidosis that the explanation names was told by such a limit.
+bool kind_rests_on_shipped_limit(const Interpretation& so_far,
+                                 const ExplanationResult& explanation) {
+    return std::any_of(
+        so_far.findings.begin(), so_far.findings.end(), [&](const FindingResult& finding) {
+            return finding.state == Truth::yes && finding.shipped_limit &&
+                   std::any_of(
+                       finding.asserts.begin(), finding.asserts.end(), [&](const std::string& id) {
+                           return contains(explanation.disorders, id);
+                       });
+        });
+}
+
 void add_reading(const Interpretation& so_far, std::vector<std::string>& said) {
     if (so_far.explanations.empty()) {
         said.emplace_back("No combination of disorders can be judged from what was given.");
         return;
     }
     const ExplanationResult& first = so_far.explanations.front();
-    said.push_back("Reading: " + as_reading(first) +
-                   (first.unchecked
-                        ? " [rests on a value not checked against its source: " + first.id + "]."
-                        : "."));
+    said.push_back(
+        "Reading: " + as_reading(first) + whose_limit(kind_rests_on_shipped_limit(so_far, first)) +
+        (first.unchecked ? " [rests on a value not checked against its source: " + first.id + "]."
+                         : "."));
     if (first.compensation) {
         said.push_back(capitalised(compensation_words(*first.compensation)) + ".");
     }
@@ -71,10 +93,6 @@ void add_reading(const Interpretation& so_far, std::vector<std::string>& said) {
                                                                 : "Nearly fits: ";
         said.push_back(std::string(lead) + with_response(other) + ".");
     }
-}
-
-bool contains(const std::vector<std::string>& ids, const std::string& id) {
-    return std::find(ids.begin(), ids.end(), id) != ids.end();
 }
 
 /// The values that a sentence says; limits are not news.
@@ -164,16 +182,12 @@ void add_findings(const Interpretation& so_far,
                   const rule::RuleSet& rules,
                   std::vector<std::string>& said) {
     const Selection selection(so_far, rules);
-    bool shipped = false;
     for (std::size_t i = 0; i < so_far.findings.size(); ++i) {
         const FindingResult& finding = so_far.findings[i];
-        shipped = shipped || (finding.state == Truth::yes && finding.shipped_limit);
         if (selection.tells(i)) {
-            said.push_back(ended(capitalised(finding.statement)));
+            said.push_back(
+                ended(capitalised(finding.statement) + whose_limit(finding.shipped_limit)));
         }
-    }
-    if (shipped) {
-        said.emplace_back("Some of this rests on shipped limits, not your laboratory's.");
     }
 }
 
