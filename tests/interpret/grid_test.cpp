@@ -14,6 +14,12 @@ namespace {
 
 using namespace isohydric;
 
+panel::Entered value_of(double value) {
+    panel::Entered entered;
+    entered.value = value;
+    return entered;
+}
+
 class Grid {
   public:
     Grid() : program_(shared_program()), block_(1024), scratch_(program_, 1024) {
@@ -27,10 +33,10 @@ class Grid {
              std::optional<double> gap_mmol_L,
              panel::StatedOnset onset) {
         panel::Panel panel;
-        panel[panel::Analyte::pco2] = panel::Entered{.value = pco2_mmHg};
-        panel[panel::Analyte::hco3] = panel::Entered{.value = hco3_mmol_L};
+        panel[panel::Analyte::pco2] = value_of(pco2_mmHg);
+        panel[panel::Analyte::hco3] = value_of(hco3_mmol_L);
         if (gap_mmol_L) {
-            panel[panel::Analyte::ag] = panel::Entered{.value = *gap_mmol_L};
+            panel[panel::Analyte::ag] = value_of(*gap_mmol_L);
         }
         panel.context.specimen = panel::Specimen::arterial;
         panel.context.onset = onset;
@@ -69,7 +75,9 @@ class Grid {
   private:
     static engine::Program shared_program() {
         const auto rules = harness::shipped_rules();
-        engine::Selection selection{.everything = false, .keep_nodes = false};
+        engine::Selection selection;
+        selection.everything = false;
+        selection.keep_nodes = false;
         for (std::uint32_t i = 0; i < rules->explanations.size(); ++i) {
             selection.explanations.push_back(i);
         }
