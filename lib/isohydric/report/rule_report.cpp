@@ -86,29 +86,29 @@ class Page {
   public:
     explicit Page(const RuleSet& rules) : rules_(rules), out_(k_width) {}
 
-    std::string write(const rule::EntryRef& entry) {
+    void write(const rule::EntryRef& entry) {
         const Line line = line_of(rules_, entry);
         out_.item("", fmt::format("{} {}", rule::describe(entry.kind), line.head->id));
         out_.item("  says      ", line.says);
         details(entry);
         head(*line.head);
-        return with_caution(out_.take(), k_width);
     }
 
-    /// All alternatives of a choice; empty if there is no such choice.
-    std::string write_choice(const std::string& choice) {
+    /// All alternatives of a choice; nothing if there is no such choice.
+    void write_choice(const std::string& choice) {
         const bool known =
             std::any_of(rules_.conventions.begin(),
                         rules_.conventions.end(),
                         [&](const auto& convention) { return convention.choice == choice; });
         if (!known) {
-            return {};
+            return;
         }
         out_.item("", "choice " + choice);
         alternatives(choice, true);
         how_to_choose(choice);
-        return with_caution(out_.take(), k_width);
     }
+
+    std::string take() { return out_.take(); }
 
   private:
     void details(const rule::EntryRef& entry);
@@ -294,12 +294,17 @@ std::vector<std::string> kind_names() {
     return names;
 }
 
+/// A choice may have the name of an entry; then both are shown.
 std::optional<std::string> show_rule(const RuleSet& rules, std::string_view id) {
+    Page page(rules);
+    page.write_choice(std::string(id));
+    std::string text = page.take();
     if (const std::optional<rule::EntryRef> entry = rules.find(id)) {
-        return Page(rules).write(*entry);
+        text += text.empty() ? "" : "\n";
+        page.write(*entry);
+        text += page.take();
     }
-    std::string choice = Page(rules).write_choice(std::string(id));
-    return choice.empty() ? std::nullopt : std::optional<std::string>(std::move(choice));
+    return text.empty() ? std::nullopt : std::optional<std::string>(with_caution(text, k_width));
 }
 
 std::vector<std::string> names_to_show(const RuleSet& rules) {

@@ -187,6 +187,10 @@ void TextWriter::reason_block(std::string_view title,
                               const std::vector<engine::Reason>& because,
                               const std::vector<rule::Citation>& sources) {
     const std::string lead = fmt::format("  {:>2} ", ++reason_number_);
+    if (!full_ && because.empty()) {
+        out_.item(lead, fmt::format("{} [{}]", title, cited(sources)));
+        return;
+    }
     out_.item(lead, title);
     for (const engine::Reason& reason : because) {
         if (full_ || (compares(reason) && told_.insert(reason.text).second)) {

@@ -62,8 +62,12 @@ class Remarks {
     }
 
     void write(TextLayout& out) const {
+        std::vector<std::string> texts;
         for (const auto& [remark, names] : remarks_) {
-            out.item("    ", fmt::format("{}: {}", listed(names), remark));
+            texts.push_back(fmt::format("{}: {}", listed(names), remark));
+        }
+        if (!texts.empty()) {
+            out.item("    ", listed(texts, "; "));
         }
     }
 
@@ -92,10 +96,9 @@ bool is_model(const interpret::Interpretation& of, const std::string& quantity) 
 }
 
 /// Where a calculated value is from, as people say it: a model is known by its source, not by its id.
-std::string
-origin(const interpret::Interpretation& of, const interpret::QuantityResult& quantity, bool full) {
+std::string origin(const interpret::Interpretation& of, const interpret::QuantityResult& quantity) {
     const bool plain = quantity.from == "calculated" || is_model(of, quantity.name);
-    return plain && !full ? std::string() : quantity.from;
+    return plain ? std::string() : quantity.from;
 }
 
 bool is_calculated(const interpret::QuantityResult& quantity) {
@@ -103,7 +106,7 @@ bool is_calculated(const interpret::QuantityResult& quantity) {
 }
 
 std::string joined(const std::string& first, const std::string& second) {
-    return first.empty() || second.empty() ? first + second : first + "; " + second;
+    return first.empty() || second.empty() ? first + second : first + ", " + second;
 }
 
 }  // namespace
@@ -145,34 +148,43 @@ void write_panel(const interpret::Interpretation& of, bool full, TextLayout& out
     remarks.write(out);
 }
 
+/// In short, values that have no interval stand in one line below those that have.
 void write_calculated(const interpret::Interpretation& of, bool full, TextLayout& out) {
     TextLayout::Rows rows;
     Remarks remarks;
+    std::vector<std::string> others;
     for (const interpret::QuantityResult& quantity : of.quantities) {
         if (!is_calculated(quantity)) {
             continue;
         }
-        rows.push_back(
-            {quantity.label,
-             with_unit(value_text(*quantity.value, quantity.decimals, quantity.low, quantity.high),
-                       interpret::unit_words(quantity.unit)),
-             side(*quantity.value, quantity.low, quantity.high),
-             range_text(quantity.low, quantity.high, quantity.decimals)});
-        const std::string from = origin(of, quantity, full);
+        const Bound& low = quantity.low;
+        const Bound& high = quantity.high;
+        const std::string value =
+            with_unit(value_text(*quantity.value, quantity.decimals, low, high),
+                      interpret::unit_words(quantity.unit));
+        const std::string remark = joined(origin(of, quantity), quantity.interval_note);
+        if (!full) {
+            remarks.add(quantity.label, remark);
+        }
+        if (!full && !low && !high) {
+            others.push_back(quantity.label + " " + value);
+            continue;
+        }
+        rows.push_back({quantity.label,
+                        value,
+                        side(*quantity.value, low, high),
+                        range_text(low, high, quantity.decimals)});
         if (full) {
-            rows.back().push_back(joined(from, quantity.interval_note));
-        } else {
-            remarks.add(quantity.label, joined(from, quantity.interval_note));
+            rows.back().push_back(remark);
         }
     }
-    if (rows.empty()) {
+    if (rows.empty() && others.empty()) {
         return;
     }
     out.heading("Calculated");
-    if (full) {
-        out.table(rows, "  ");
-    } else {
-        out.table_side_by_side(rows, "  ");
+    out.table(rows, "  ");
+    if (!others.empty()) {
+        out.item("  ", listed(others, "; "));
     }
     remarks.write(out);
 }

@@ -33,7 +33,8 @@ class TextLayout {
     /// The same rows in two blocks side by side, the first half to the left, if both fit in the width; else as table().
     void table_side_by_side(const Rows& rows, std::string_view indent);
 
-    [[nodiscard]] std::string take() { return std::move(text_); }
+    /// The lines so far; the layout is empty afterwards.
+    [[nodiscard]] std::string take() { return std::exchange(text_, {}); }
 
   private:
     void line(std::string_view text);
