@@ -140,3 +140,12 @@ TEST_CASE("logic: any one of several exceptions takes precedence") {
     CHECK(evaluated.finding(wanted, 3) == Truth::no);
     CHECK(evaluated.finding(wanted, 4) == Truth::unknown);
 }
+
+TEST_CASE("logic: zero and minus zero are equal, and so are numbers too large to round") {
+    CHECK(truth_at("pHmeasured * 0 < 0", -1.0) == Truth::no);
+    CHECK(truth_at("pHmeasured * 0 = 0", -1.0) == Truth::yes);
+    CHECK(truth_at("pHmeasured < 2 * pHmeasured", 8e307) == Truth::no);
+    CHECK(truth_at("pHmeasured = 2 * pHmeasured", 8e307) == Truth::yes);
+    CHECK(truth_at("pHmeasured < 2 * pHmeasured", 8e299) == Truth::yes);
+    CHECK(truth_at("-pHmeasured < pHmeasured", 8e307) == Truth::yes);
+}

@@ -166,3 +166,9 @@ TEST_CASE("models: inputs and result are converted to the units of the rules") {
     // Computed apart from this program: 0.0307 * 40 * 10^1.3 = 24.501821.
     CHECK(std::abs(evaluated.quantity(hco3).value() - 24501.821) < 0.0005);
 }
+
+TEST_CASE("models: minus zero is 0 at the end of a domain") {
+    const auto model = index_of("baseExcess.clsi");
+    CHECK(evaluate(model, {7.4, 24.0, -0.0}) == evaluate(model, {7.4, 24.0, 0.0}));
+    CHECK(evaluate(model, {7.4, 24.0, -0.0}).has_value());
+}

@@ -39,10 +39,10 @@ struct ModelInput {
     const std::uint8_t* __restrict missing;
     double low, high;
 
-    /// 1 where it is missing or outside its domain, by the signs of the distances to the ends.
+    /// 1 where it is missing or outside its domain, by the signs of the distances to the ends (-0 made 0).
     [[nodiscard]] Flag unusable(std::size_t row) const {
-        const auto above_low = std::bit_cast<Flag>(values[row] - low);
-        const auto below_high = std::bit_cast<Flag>(high - values[row]);
+        const auto above_low = std::bit_cast<Flag>((values[row] - low) + 0.0);
+        const auto below_high = std::bit_cast<Flag>((high - values[row]) + 0.0);
         return missing[row] | ((above_low | below_high) >> 63);
     }
 };
