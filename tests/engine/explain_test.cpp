@@ -161,6 +161,25 @@ TEST_CASE("explain: context, presence and the margin") {
           Lines{"0 bands not widened by the margin of the measurement"});
 }
 
+TEST_CASE("explain: that a value is given goes without saying beside its comparison") {
+    const auto panel = panel_of({{Analyte::na, 150.0}, {Analyte::k, 4.0}});
+    CHECK(why("Na.exists() and K.exists() and Na > 145 'mmol/L'", panel) ==
+          Lines{"0 sodium 150 > 145"});
+    CHECK(why("Na.exists() and K.exists()", panel) ==
+          Lines{"0 sodium is given", "0 potassium is given"});
+    CHECK(why("Cl.exists() and Na > 145 'mmol/L'", panel) == Lines{"0 chloride is missing"});
+}
+
+TEST_CASE("explain: a limit that is a quantity says its name once") {
+    RulesByHand rules;
+    rules.interval("x", "mmol/L", 1.0, 145.0);
+    rules.quantity("upper", "limits.x.high", "mmol/L");
+    rules.set().quantities[0].label = "upper limit of x";
+    const auto high = rules.condition("high", "Na > upper");
+    CHECK(explained(Evaluated(rules, {panel_of({{Analyte::na, 150.0}})}), condition(high)) ==
+          Lines{"0 sodium 150 > upper limit of x 145.0", "1 upper limit of x = 145.0 mmol/L"});
+}
+
 TEST_CASE("explain: an unknown comparison says what it needs") {
     CHECK(why("Na > 145 'mmol/L' and K > Cl", panel_of({{Analyte::na, 150.0}})) ==
           Lines{"0 potassium unknown: needs potassium", "0 chloride unknown: needs chloride"});

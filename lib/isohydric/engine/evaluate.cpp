@@ -3,89 +3,73 @@
 #include "isohydric/engine/dispatch.hpp"
 #include "isohydric/engine/operations.hpp"
 
+#include <array>
+
 namespace isohydric::engine {
 
-void run(const Operation& operation, const Columns& columns) {
-    switch (operation.code) {
-    case OpCode::constant_number:
-        return op::constant_number(operation, columns);
-    case OpCode::constant_missing:
-        return op::constant_missing(operation, columns);
-    case OpCode::constant_truth:
-        return op::constant_truth(operation, columns);
-    case OpCode::load_analyte:
-        return op::load_analyte(operation, columns);
-    case OpCode::load_rounding:
-        return op::load_rounding(operation, columns);
-    case OpCode::load_context:
-        return op::load_context(operation, columns);
-    case OpCode::load_near:
-        return op::load_near(operation, columns);
-    case OpCode::code_equals:
-        return op::code_equals(operation, columns);
-    case OpCode::select_interval:
-        return op::select_interval(operation, columns);
-    case OpCode::load_limit:
-        return op::load_limit(operation, columns);
-    case OpCode::add:
-        return op::add(operation, columns);
-    case OpCode::subtract:
-        return op::subtract(operation, columns);
-    case OpCode::multiply:
-        return op::multiply(operation, columns);
-    case OpCode::divide:
-        return op::divide(operation, columns);
-    case OpCode::negate:
-        return op::negate(operation, columns);
-    case OpCode::absolute:
-        return op::absolute(operation, columns);
-    case OpCode::ln:
-        return op::ln(operation, columns);
-    case OpCode::log:
-        return op::log(operation, columns);
-    case OpCode::exponential:
-        return op::exponential(operation, columns);
-    case OpCode::power:
-        return op::power(operation, columns);
-    case OpCode::square_root:
-        return op::square_root(operation, columns);
-    case OpCode::less:
-        return op::less(operation, columns);
-    case OpCode::less_equal:
-        return op::less_equal(operation, columns);
-    case OpCode::greater:
-        return op::greater(operation, columns);
-    case OpCode::greater_equal:
-        return op::greater_equal(operation, columns);
-    case OpCode::equal:
-        return op::equal(operation, columns);
-    case OpCode::not_equal:
-        return op::not_equal(operation, columns);
-    case OpCode::truth_equal:
-        return op::truth_equal(operation, columns);
-    case OpCode::truth_not_equal:
-        return op::truth_not_equal(operation, columns);
-    case OpCode::logical_and:
-        return op::logical_and(operation, columns);
-    case OpCode::logical_or:
-        return op::logical_or(operation, columns);
-    case OpCode::logical_xor:
-        return op::logical_xor(operation, columns);
-    case OpCode::logical_implies:
-        return op::logical_implies(operation, columns);
-    case OpCode::logical_not:
-        return op::logical_not(operation, columns);
-    case OpCode::number_exists:
-        return op::number_exists(operation, columns);
-    case OpCode::truth_exists:
-        return op::truth_exists(operation, columns);
-    case OpCode::choose_number:
-        return op::choose_number(operation, columns);
-    case OpCode::first_number:
-        return op::first_number(operation, columns);
-    case OpCode::model:
-        return op::model(operation, columns);
+namespace {
+
+struct Entry {
+    OpCode code;
+    void (*run)(const Operation& operation, const Columns& columns);
+};
+
+/// In the order of the codes.
+constexpr std::array k_operations{Entry{OpCode::constant_number, op::constant_number},
+                                  Entry{OpCode::constant_missing, op::constant_missing},
+                                  Entry{OpCode::constant_truth, op::constant_truth},
+                                  Entry{OpCode::load_analyte, op::load_analyte},
+                                  Entry{OpCode::load_rounding, op::load_rounding},
+                                  Entry{OpCode::load_context, op::load_context},
+                                  Entry{OpCode::load_near, op::load_near},
+                                  Entry{OpCode::code_equals, op::code_equals},
+                                  Entry{OpCode::select_interval, op::select_interval},
+                                  Entry{OpCode::load_limit, op::load_limit},
+                                  Entry{OpCode::add, op::add},
+                                  Entry{OpCode::subtract, op::subtract},
+                                  Entry{OpCode::multiply, op::multiply},
+                                  Entry{OpCode::divide, op::divide},
+                                  Entry{OpCode::negate, op::negate},
+                                  Entry{OpCode::absolute, op::absolute},
+                                  Entry{OpCode::ln, op::ln},
+                                  Entry{OpCode::log, op::log},
+                                  Entry{OpCode::exponential, op::exponential},
+                                  Entry{OpCode::power, op::power},
+                                  Entry{OpCode::square_root, op::square_root},
+                                  Entry{OpCode::less, op::less},
+                                  Entry{OpCode::less_equal, op::less_equal},
+                                  Entry{OpCode::greater, op::greater},
+                                  Entry{OpCode::greater_equal, op::greater_equal},
+                                  Entry{OpCode::equal, op::equal},
+                                  Entry{OpCode::not_equal, op::not_equal},
+                                  Entry{OpCode::truth_equal, op::truth_equal},
+                                  Entry{OpCode::truth_not_equal, op::truth_not_equal},
+                                  Entry{OpCode::logical_and, op::logical_and},
+                                  Entry{OpCode::logical_or, op::logical_or},
+                                  Entry{OpCode::logical_xor, op::logical_xor},
+                                  Entry{OpCode::logical_implies, op::logical_implies},
+                                  Entry{OpCode::logical_not, op::logical_not},
+                                  Entry{OpCode::number_exists, op::number_exists},
+                                  Entry{OpCode::truth_exists, op::truth_exists},
+                                  Entry{OpCode::choose_number, op::choose_number},
+                                  Entry{OpCode::first_number, op::first_number},
+                                  Entry{OpCode::model, op::model}};
+
+constexpr bool in_order() {
+    for (std::size_t index = 0; index < k_operations.size(); ++index) {
+        if (static_cast<std::size_t>(k_operations[index].code) != index) {
+            return false;
+        }
     }
+    return true;
+}
+
+static_assert(in_order());
+
+}  // namespace
+
+void run(const Operation& operation, const Columns& columns) {
+    k_operations.at(static_cast<std::size_t>(operation.code)).run(operation, columns);
 }
 
 bool is_constant(OpCode code) {

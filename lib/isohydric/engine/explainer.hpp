@@ -21,14 +21,14 @@ class Explainer {
     void tell(const rule::Symbol& name, int depth);
     void tell_number(const rule::Expression& expression, int depth);
     /// Why a finding has its state, without saying which finding it is.
-    void tell_reasons(std::uint32_t finding, int depth);
+    void tell_reasons(std::uint32_t index, int depth);
 
     [[nodiscard]] std::vector<Reason> take() { return std::move(lines_); }
 
   private:
     // Truths (explainer.cpp).
     void tell_parts(const rule::Expression& expression, int depth);
-    void tell_where(const rule::Expression& expression, Truth wanted, int depth);
+    void tell_all(const std::vector<const rule::Expression*>& parts, int depth);
     void tell_comparison(const rule::Expression& expression, int depth);
     void tell_code(const rule::Expression& expression, int depth);
     void tell_presence(const rule::Expression& expression, int depth);
@@ -48,6 +48,8 @@ class Explainer {
                       const rule::Alternative& alternative,
                       const std::string& result,
                       int depth);
+    [[nodiscard]] std::string formula_text(const rule::Expression& formula,
+                                           const std::string& label) const;
     void tell_model(const rule::Symbol& name, const std::string& result, int depth);
     [[nodiscard]] rule::ExpressionPtr
     chosen_sides(const rule::ExpressionPtr& expression,

@@ -97,10 +97,7 @@ void Explainer::tell_formula(const rule::Symbol& name,
             add(view_.label(name) + " " + result + from, depth, std::move(sources));
         }
     } else {
-        const bool has_names = !rule::names_of(*formula).empty();
-        const std::string values = has_names ? in_values(*formula) + " = " : "";
-        add(view_.label(name) + " = " + (has_names ? in_words(*formula) + " = " : "") +
-                (formula->kind == rule::NodeKind::name ? "" : values) + result + from,
+        add(view_.label(name) + " = " + formula_text(*formula, view_.label(name)) + result + from,
             depth,
             std::move(sources));
     }
@@ -108,6 +105,18 @@ void Explainer::tell_formula(const rule::Symbol& name,
         tell(*condition, depth + 1);
     }
     tell_quantities(*formula, depth + 1);
+}
+
+/// "anion gap + albumin term = 22.4 + 5.0 = ", as much of it as says more than the label and the result.
+std::string Explainer::formula_text(const rule::Expression& formula,
+                                    const std::string& label) const {
+    if (rule::names_of(formula).empty()) {
+        return "";
+    }
+    const std::string words = in_words(formula);
+    const std::string values =
+        formula.kind == rule::NodeKind::name ? "" : in_values(formula) + " = ";
+    return words == label ? values : words + " = " + values;
 }
 
 /// "HCO3 = carbonicAcid.bicarbonate(pH 7.21, pCO2 29.0, solubility 0.0307, pK 6.1) = 11.2 mmol/L"

@@ -17,7 +17,7 @@ namespace isohydric::engine {
 /// A registered model.
 struct Model {
     rule::ModelSignature signature;
-    void (*evaluate)(const rule::ModelSignature& signature, const ModelColumns& columns);
+    void (*evaluate)(const rule::ModelSignature& signature, const ModelColumns& columns) = nullptr;
 };
 
 using Models = std::vector<Model>;

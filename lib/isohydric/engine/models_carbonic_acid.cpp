@@ -114,7 +114,7 @@ void add_hydrogen_ion(Models& models) {
         hco3_port());
 }
 
-void add_published_relations(Models& models) {
+void add_published_bicarbonate(Models& models) {
     add_model(
         models,
         "bicarbonate.severinghaus1976",
@@ -126,15 +126,6 @@ void add_published_relations(Models& models) {
         pco2_port());
     add_model(
         models,
-        "pH.severinghaus1976",
-        [](auto pco2_mmHg, auto hco3_mmol_L) {
-            return chem::severinghaus_1976::ph(pco2_mmHg, hco3_mmol_L);
-        },
-        result("pH", "1"),
-        pco2_port(),
-        hco3_port());
-    add_model(
-        models,
         "bicarbonate.christiansen1981",
         [](auto ph, auto pco2_kPa) {
             return chem::christiansen_1981::bicarbonate_mmol_L(ph, pco2_kPa);
@@ -144,15 +135,6 @@ void add_published_relations(Models& models) {
         pco2_kPa_port());
     add_model(
         models,
-        "pH.christiansen1981",
-        [](auto pco2_kPa, auto hco3_mmol_L) {
-            return chem::christiansen_1981::ph(pco2_kPa, hco3_mmol_L);
-        },
-        result("pH", "1"),
-        pco2_kPa_port(),
-        hco3_port());
-    add_model(
-        models,
         "bicarbonate.siggaardAndersen1988",
         [](auto ph, auto pco2_kPa) {
             return chem::siggaard_andersen_1988::bicarbonate_mmol_L(ph, pco2_kPa);
@@ -160,6 +142,27 @@ void add_published_relations(Models& models) {
         result("HCO3", "mmol/L"),
         ph_port(),
         pco2_kPa_port());
+}
+
+void add_published_ph(Models& models) {
+    add_model(
+        models,
+        "pH.severinghaus1976",
+        [](auto pco2_mmHg, auto hco3_mmol_L) {
+            return chem::severinghaus_1976::ph(pco2_mmHg, hco3_mmol_L);
+        },
+        result("pH", "1"),
+        pco2_port(),
+        hco3_port());
+    add_model(
+        models,
+        "pH.christiansen1981",
+        [](auto pco2_kPa, auto hco3_mmol_L) {
+            return chem::christiansen_1981::ph(pco2_kPa, hco3_mmol_L);
+        },
+        result("pH", "1"),
+        pco2_kPa_port(),
+        hco3_port());
     add_model(
         models,
         "pH.siggaardAndersen1988",
@@ -227,7 +230,8 @@ void add_carbonic_acid_models(Models& models) {
     add_equilibrium(models);
     add_total_co2(models);
     add_hydrogen_ion(models);
-    add_published_relations(models);
+    add_published_bicarbonate(models);
+    add_published_ph(models);
     add_constants(models);
 }
 

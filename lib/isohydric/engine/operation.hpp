@@ -16,7 +16,8 @@ enum class SlotKind : std::uint8_t { number, truth, index };
 struct Slot {
     SlotKind kind{};
     std::uint32_t index{};
-    friend auto operator<=>(const Slot&, const Slot&) = default;
+    friend auto operator<=>(const Slot&,
+                            const Slot&) = default;  // NOLINT(modernize-use-nullptr): a false alarm
 };
 
 /// What an operation does. Numbers are missing where an operand is, where a function is outside its domain, after a
@@ -71,7 +72,8 @@ struct Operation {
     std::uint32_t argument{};
     std::uint32_t part{};
     double number{};
-    friend auto operator<=>(const Operation&, const Operation&) = default;
+    friend auto operator<=>(const Operation&,
+                            const Operation&) = default;  // NOLINT(modernize-use-nullptr): likewise
 };
 
 }  // namespace isohydric::engine
