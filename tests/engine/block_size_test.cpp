@@ -8,7 +8,9 @@
 
 #include "engine/rules_by_hand.hpp"
 
-using namespace isohydric;
+namespace engine = isohydric::engine;
+namespace panel = isohydric::panel;
+namespace test = isohydric::test;
 using panel::Analyte;
 
 namespace {
@@ -85,15 +87,31 @@ struct Bits {
     friend bool operator==(const Bits&, const Bits&) = default;
 };
 
-/// Every quantity, condition and finding of every row.
+/// Adds every quantity, condition and finding of one row.
+void add_row(Bits& bits,
+             const engine::Program& program,
+             const engine::Scratch& scratch,
+             std::size_t row) {
+    for (std::uint32_t index = 0; index < program.rules().quantities.size(); ++index) {
+        const engine::Slot slot = program.quantity(index).value();
+        bits.numbers.push_back(std::bit_cast<std::uint64_t>(scratch.number(slot, row)));
+        bits.numbers.push_back(scratch.missing(slot, row) ? 1 : 0);
+    }
+    for (std::uint32_t index = 0; index < program.rules().conditions.size(); ++index) {
+        bits.truths.push_back(scratch.truth(program.condition(index).value(), row));
+    }
+    for (std::uint32_t index = 0; index < program.rules().findings.size(); ++index) {
+        bits.truths.push_back(scratch.truth(program.finding(index).value(), row));
+    }
+}
+
 Bits evaluate_in_blocks(const test::RulesByHand& rules,
                         const std::vector<panel::Panel>& panels,
                         std::size_t block_size,
                         bool keep_nodes) {
     engine::Selection selection;
     selection.keep_nodes = keep_nodes;
-    const auto set = rules.rules();
-    const engine::Program program(set, selection);
+    const engine::Program program(rules.rules(), selection);
     engine::Scratch scratch(program, block_size);
     panel::PanelBlock block(block_size);
     Bits bits;
@@ -104,24 +122,14 @@ Bits evaluate_in_blocks(const test::RulesByHand& rules,
         }
         engine::evaluate(program, block, scratch);
         for (std::size_t row = 0; row < block.size(); ++row) {
-            for (std::uint32_t index = 0; index < set->quantities.size(); ++index) {
-                const engine::Slot slot = program.quantity(index).value();
-                bits.numbers.push_back(std::bit_cast<std::uint64_t>(scratch.number(slot, row)));
-                bits.numbers.push_back(scratch.missing(slot, row) ? 1 : 0);
-            }
-            for (std::uint32_t index = 0; index < set->conditions.size(); ++index) {
-                bits.truths.push_back(scratch.truth(program.condition(index).value(), row));
-            }
-            for (std::uint32_t index = 0; index < set->findings.size(); ++index) {
-                bits.truths.push_back(scratch.truth(program.finding(index).value(), row));
-            }
+            add_row(bits, program, scratch, row);
         }
     }
     return bits;
 }
 
 std::vector<panel::Panel> random_panels() {
-    std::mt19937 random(k_seed);
+    std::mt19937 random(k_seed);  // NOLINT(cert-msc51-cpp): the same panels every time
     std::vector<panel::Panel> panels;
     for (std::size_t row = 0; row < k_rows; ++row) {
         panels.push_back(random_panel(random));

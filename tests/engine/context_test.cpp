@@ -3,7 +3,9 @@
 
 #include "engine/evaluated.hpp"
 
-using namespace isohydric;
+namespace engine = isohydric::engine;
+namespace panel = isohydric::panel;
+namespace test = isohydric::test;
 using engine::Truth;
 using panel::Analyte;
 using test::Evaluated;

@@ -12,7 +12,12 @@
 #include "engine/evaluated.hpp"
 #include "engine/published_models.hpp"
 
-using namespace isohydric;
+namespace chem = isohydric::chem;
+namespace engine = isohydric::engine;
+namespace panel = isohydric::panel;
+namespace rule = isohydric::rule;
+namespace test = isohydric::test;
+namespace units = isohydric::units;
 
 namespace {
 

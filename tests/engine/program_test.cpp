@@ -5,7 +5,10 @@
 
 #include "engine/evaluated.hpp"
 
-using namespace isohydric;
+namespace engine = isohydric::engine;
+namespace panel = isohydric::panel;
+namespace rule = isohydric::rule;
+namespace test = isohydric::test;
 using engine::OpCode;
 using engine::Truth;
 using panel::Analyte;
@@ -107,7 +110,7 @@ TEST_CASE("program: columns are used again once nobody reads them") {
     RulesByHand rules;
     std::string chain = "Na";
     for (int step = 0; step < 20; ++step) {
-        chain = "(" + chain + " + K) * 2";
+        chain.insert(0, "(").append(" + K) * 2");
     }
     const auto wanted = rules.quantity("wanted", chain, "mmol/L");
     engine::Selection selection = lean();

@@ -2,6 +2,7 @@
 
 namespace isohydric::test {
 
+// NOLINTNEXTLINE(readability-function-size): one table
 const std::vector<PublishedModel>& published_models() {
     static const std::vector<PublishedModel> k_models{
         {"carbonicAcid.dissolved", "", "", {}},

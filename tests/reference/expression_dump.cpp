@@ -14,6 +14,7 @@
 #include <nlohmann/json.hpp>
 
 #include <charconv>
+#include <exception>
 #include <fstream>
 #include <iostream>
 #include <map>
@@ -22,7 +23,12 @@
 
 #include "reference/limit_panels.hpp"
 
-using namespace isohydric;
+namespace diag = isohydric::diag;
+namespace engine = isohydric::engine;
+namespace num = isohydric::num;
+namespace panel = isohydric::panel;
+namespace rule = isohydric::rule;
+using isohydric::test::LimitPanels;
 using nlohmann::ordered_json;
 
 namespace {
@@ -190,7 +196,7 @@ void write_rows(const std::shared_ptr<const rule::RuleSet>& rules,
     panel::PanelBlock block(k_block_size);
     const RowWriter writer(program, scratch, block);
     const auto names = names_in(expressions);
-    test::LimitPanels generated(*rules);
+    LimitPanels generated(*rules);
     std::size_t on_limit = 0;
     for (std::size_t done = 0; done < panels; done += block.size()) {
         block.clear();
@@ -220,10 +226,7 @@ void write_rows(const std::shared_ptr<const rule::RuleSet>& rules,
     std::cout << ordered_json{{"onLimit", on_limit}}.dump() << '\n';
 }
 
-}  // namespace
-
-int main(int argc, char** argv) {
-    const std::vector<std::string> arguments(argv, argv + argc);
+int run(const std::vector<std::string>& arguments) {
     if (arguments.size() != 4) {
         std::cerr << "usage: expression_dump <rule folder> <set path> <panels>\n";
         return 2;
@@ -242,4 +245,15 @@ int main(int argc, char** argv) {
     write_expressions(expressions);
     write_rows(rules, expressions, panels);
     return 0;
+}
+
+}  // namespace
+
+int main(int argc, char** argv) {
+    try {
+        return run({argv, argv + argc});
+    } catch (const std::exception& error) {
+        std::cerr << error.what() << '\n';
+        return 1;
+    }
 }

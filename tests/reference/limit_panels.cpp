@@ -35,7 +35,8 @@ void add_literals(Limits& limits, const rule::ExpressionPtr& expression) {
 
 }  // namespace
 
-LimitPanels::LimitPanels(const rule::RuleSet& rules) : rules_(rules), random_(k_seed) {
+LimitPanels::LimitPanels(const rule::RuleSet& rules)
+    : rules_(rules), random_(k_seed) {  // NOLINT(cert-msc51-cpp): the same panels every time
     add_intervals(limits_, rules);
     for (const rule::Quantity& quantity : rules.quantities) {
         for (const rule::Alternative& alternative : quantity.alternatives) {

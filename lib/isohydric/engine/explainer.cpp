@@ -44,20 +44,6 @@ constexpr std::array<Relation, 6> k_relations{{{NodeKind::equal, "=", "!="},
            kind == NodeKind::logical_xor || kind == NodeKind::logical_implies;
 }
 
-/// The operands of `and` or `or`, those of nested ones of the same kind among them; of the others just the two.
-void collect_parts(const rule::Expression& expression,
-                   NodeKind kind,
-                   std::vector<const rule::Expression*>& parts) {
-    const bool nests = kind == NodeKind::logical_and || kind == NodeKind::logical_or;
-    for (const rule::ExpressionPtr& child : expression.children) {
-        if (nests && child->kind == kind) {
-            collect_parts(*child, kind, parts);
-        } else {
-            parts.push_back(child.get());
-        }
-    }
-}
-
 [[nodiscard]] bool is_presence(NodeKind kind) {
     return kind == NodeKind::call_exists || kind == NodeKind::call_empty;
 }
@@ -96,34 +82,22 @@ void Explainer::tell(const rule::Symbol& name, int depth) {
     }
 }
 
-/// Of an `and` that does not hold the parts that do not, of an `or` that holds those that do, of an unknown one the unknown;
-/// else all parts.
+/// Of an `and` that does not hold the sides that do not, of an `or` that holds those that do, of an unknown one the unknown;
+/// else both sides.
 void Explainer::tell_parts(const rule::Expression& expression, int depth) {
     const Truth truth = view_.truth(expression);
     const bool is_and = expression.kind == NodeKind::logical_and;
     const bool is_or = expression.kind == NodeKind::logical_or;
     const bool some_decide =
         truth == Truth::unknown || (is_and && truth == Truth::no) || (is_or && truth == Truth::yes);
-    std::vector<const rule::Expression*> parts;
-    collect_parts(expression, expression.kind, parts);
-    if (some_decide) {
-        std::erase_if(parts, [&](const auto* part) { return view_.truth(*part) != truth; });
+    const bool premise_decides = expression.kind == NodeKind::logical_implies &&
+                                 view_.truth(*expression.children[0]) == Truth::no;
+    if (premise_decides) {
+        return tell(*expression.children[0], depth);
     }
-    if (expression.kind == NodeKind::logical_implies && view_.truth(*parts[0]) == Truth::no) {
-        parts.resize(1);
-    }
-    tell_all(parts, depth);
-}
-
-/// Each part; that a value is given goes without saying beside parts that use values.
-void Explainer::tell_all(const std::vector<const rule::Expression*>& parts, int depth) {
-    const auto says_given = [this](const rule::Expression* part) {
-        return part->kind == NodeKind::call_exists && view_.truth(*part) == Truth::yes;
-    };
-    const bool only_given = std::all_of(parts.begin(), parts.end(), says_given);
-    for (const rule::Expression* part : parts) {
-        if (only_given || !says_given(part)) {
-            tell(*part, depth);
+    for (const rule::ExpressionPtr& child : expression.children) {
+        if (!some_decide || view_.truth(*child) == truth) {
+            tell(*child, depth);
         }
     }
 }

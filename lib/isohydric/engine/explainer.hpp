@@ -28,7 +28,6 @@ class Explainer {
   private:
     // Truths (explainer.cpp).
     void tell_parts(const rule::Expression& expression, int depth);
-    void tell_all(const std::vector<const rule::Expression*>& parts, int depth);
     void tell_comparison(const rule::Expression& expression, int depth);
     void tell_code(const rule::Expression& expression, int depth);
     void tell_presence(const rule::Expression& expression, int depth);
